@@ -139,12 +139,10 @@ export function quantitySchema(kind: QuantityKind, bounds: Bounds = {}) {
     .refine((number) => number >= min && number > above, { error: () => `Must be ${lowest(kind, bounds)}` })
     .refine((number) => number <= max, { error: () => `Must be at most ${both(kind, max)}` });
   const typed = z.object({ text: z.string().max(40), unit: z.string().max(24) }).optional();
-  return z
-    .object({ value, typed })
-    .refine((quantity) => saysTheSame(kind, quantity), {
-      path: ['typed'],
-      error: 'What was typed and the value differ',
-    });
+  return z.object({ value, typed }).refine((quantity) => saysTheSame(kind, quantity), {
+    path: ['typed'],
+    error: 'What was typed and the value differ',
+  });
 }
 
 const lowest = (kind: QuantityKind, { min, above }: Bounds) =>
