@@ -6,8 +6,8 @@ import { thicknessNameSchema } from './build-up';
 import { assemblySchema, limitVerdictSchema, wordsSchema } from './study';
 import { idSchema } from './text';
 
-/** What a flag is about: a limit not met or not to be told, a hold, or a run that nothing says how to insulate. */
-export const flagKinds = [...limitKinds, 'hold', 'not-specified'] as const;
+/** What a flag is about: a limit not met or not to be told, a hold, a run that nothing says how to insulate or that cannot be calculated. */
+export const flagKinds = [...limitKinds, 'hold', 'not-specified', 'not-calculated'] as const;
 export type FlagKind = (typeof flagKinds)[number];
 
 export const flagSchema = z.object({
