@@ -1,0 +1,23 @@
+import { inchLabel, millimetreLabel, type ThicknessName } from '@/api/engine/standards/thickness-name';
+import type { Words } from '@/api/engine/words';
+
+import { showWithUnit, type UnitSystem } from './quantities';
+
+/** A sentence of the engine in a reader's units. */
+export const wordsText = (words: Words, units: UnitSystem): string =>
+  words.map((part) => partText(part, units)).join('');
+
+/** Names of layers from the inside out, as a person reads them: `64 + 51 mm`, `2-1/2 + 2 in`. */
+export function thicknessText(names: readonly ThicknessName[], units: UnitSystem): string {
+  if (units === 'SI') return `${names.map(millimetreLabel).join(' + ')} mm`;
+  const inches = names.every((name) => name.startsWith('in:'));
+  return inches
+    ? `${names.map(inchLabel).join(' + ')} in`
+    : names.map((name) => (name.startsWith('in:') ? `${inchLabel(name)} in` : inchLabel(name))).join(' + ');
+}
+
+function partText(part: Words[number], units: UnitSystem): string {
+  if (typeof part === 'string') return part;
+  if ('thickness' in part) return thicknessText(part.thickness, units);
+  return showWithUnit(part.kind, part.value, { units, digits: part.digits });
+}
