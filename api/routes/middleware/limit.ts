@@ -1,0 +1,23 @@
+import type { RequestHandler } from 'express';
+import { rateLimit } from 'express-rate-limit';
+
+import { AppError } from '@/api/errors';
+
+/** So many failed requests from one network address; what succeeds is not counted. */
+export type Limit = { tries: number; minutes: number };
+
+export function limitByAddress({ tries, minutes }: Limit): RequestHandler {
+  return rateLimit({
+    windowMs: minutes * 60_000,
+    limit: tries,
+    skipSuccessfulRequests: true,
+    standardHeaders: false,
+    legacyHeaders: false,
+    handler: (_request, _response, next) =>
+      next(
+        new AppError('too-many-tries', `Too many tries from your network. Try again in ${minutes} minutes.`, {
+          retryAfter: minutes * 60,
+        }),
+      ),
+  });
+}
