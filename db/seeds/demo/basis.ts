@@ -15,7 +15,7 @@ export const demoJob: Omit<JobInput, 'contactIds' | 'bidDue'> = {
   scope:
     'Insulate new and re-piped steam, condensate, heating, domestic and chilled water, refrigerant suction and air ductwork in three phases while the wards stay open.\nPhase 1 wards (nights), phase 2 plant room, phase 3 tunnel and roof.',
   currency: 'EUR',
-  codeEdition: 'ASHRAE 90.1-2019',
+  codeEdition: 'ashrae-90.1-2019',
   climateZone: '4A',
   altitude: typed('altitude', '8 m'),
   documentUnits: 'SI',

@@ -46,7 +46,7 @@ export const demoPlaces = {
     ...outOfReach,
     name: 'Concealed ceiling void',
     plenum: true,
-    ductLocation: 'indirectly-conditioned',
+    ductLocation: 'indirectly_conditioned',
     note: 'Runs warmer and damper than the ward below: do not use the room at 24 °C and 50 %',
     air: {
       hottest: { air: 32, source: note4 },
@@ -76,7 +76,7 @@ export const demoPlaces = {
   'plant-room': place({
     ...withinReach,
     name: 'Plant room',
-    ductLocation: 'unconditioned-space',
+    ductLocation: 'unconditioned_space_and_buried',
     note: 'Boilers running: 34 to 36 °C measured on the walk, 40 °C taken as hottest',
     air: {
       hottest: { air: 40, source: note4 },

@@ -33,7 +33,7 @@ type Vessel = Common & { diameter: string; length: string; orientation: 'horizon
 type Flat = Common & { area: string; height: string; count: number };
 type PipeSize = Extract<Shape, { kind: 'pipe' }>['size'];
 
-export const steel = (dn: number): PipeSize => ({ standard: 'asme-steel', nominal: `DN ${dn}` });
+export const steel = (nominal: string): PipeSize => ({ standard: 'asme-steel', nominal });
 export const copper = (nominal: string): PipeSize => ({ standard: 'astm-copper', nominal });
 
 const run = (shape: Shape, common: Common): DemoRun => ({
