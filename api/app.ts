@@ -1,14 +1,23 @@
 import express, { Router, type Express, type RequestHandler } from 'express';
 
 import { AppError } from '@/api/errors';
+import { basisRoutes } from '@/api/routes/basis-routes';
+import { buildUpRoutes } from '@/api/routes/build-up-routes';
+import { contactRoutes } from '@/api/routes/contact-routes';
 import { healthRoutes, type Readiness } from '@/api/routes/health-routes';
+import { jobRoutes } from '@/api/routes/job-routes';
+import { libraryRoutes } from '@/api/routes/library-routes';
 import { securityHeaders } from '@/api/routes/middleware/headers';
 import type { Limit } from '@/api/routes/middleware/limit';
 import { withMember } from '@/api/routes/middleware/member';
 import { problemHandler } from '@/api/routes/middleware/problem-handler';
 import { sameSite } from '@/api/routes/middleware/same-site';
 import { webApp } from '@/api/routes/middleware/web-app';
+import { placeRoutes } from '@/api/routes/place-routes';
+import { runRoutes } from '@/api/routes/run-routes';
+import { serviceRoutes } from '@/api/routes/service-routes';
 import { sessionRoutes } from '@/api/routes/session-routes';
+import { specificationRoutes } from '@/api/routes/specification-routes';
 import type { Services } from '@/api/services/services';
 
 export type AppParts = {
@@ -43,6 +52,9 @@ export function createApp({ session, services, readiness, signInLimit, publicUrl
 function routes(services: Services, signInLimit: Limit): Router {
   const router = Router();
   router.use(sessionRoutes(services.session, signInLimit));
+  router.use(jobRoutes(services.job), contactRoutes(services.contact), basisRoutes(services.basis));
+  router.use(placeRoutes(services.place), serviceRoutes(services.service), buildUpRoutes(services.buildUp));
+  router.use(specificationRoutes(services.specification), runRoutes(services.run), libraryRoutes(services.library));
   return router;
 }
 

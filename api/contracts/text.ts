@@ -1,7 +1,8 @@
 import { z } from 'zod';
 
-const oneLine = /^[^\p{Cc}\p{Zl}\p{Zp}]*$/u;
-const manyLines = /^[^\p{Cc}]*$/u;
+// half of a surrogate pair (Cs) is no character: PostgreSQL refuses it, and nothing can print it
+const oneLine = /^[^\p{Cc}\p{Cs}\p{Zl}\p{Zp}]*$/u;
+const manyLines = /^[^\p{Cc}\p{Cs}]*$/u;
 
 const upTo = (max: number) => z.string({ error: 'Must be text' }).trim().max(max, `At most ${max} characters`);
 
@@ -16,8 +17,10 @@ export const paragraph = (max = 2000) =>
   });
 
 export const emailSchema = z.email('Must be an e-mail address').max(254, 'At most 254 characters');
-export const idSchema = z.uuid('Not a known id');
-export const dateSchema = z.iso.date('Must be a date');
+export const idSchema = z.uuid('Not a known id').toLowerCase();
+export const dateSchema = z.iso
+  .date('Must be a date')
+  .refine((date) => date >= '1900' && date < '2200', { error: 'Must be between 1900 and 2199' });
 
 /** Every stored row: an edit names the version it saw. */
 export const rowSchema = z.object({ id: idSchema, version: z.number().int().positive() });

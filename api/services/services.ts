@@ -2,8 +2,17 @@ import type { Clock } from '@/api/adapters/clock';
 import type { Doors } from '@/db/repositories/doors';
 import type { WithFirm } from '@/db/with-firm';
 
+import { createBasisService } from './basis-service';
+import { createBuildUpService } from './build-up-service';
+import { createContactService } from './contact-service';
+import { createJobService } from './job-service';
+import { createLibraryService } from './library-service';
 import { createMemberService } from './member-service';
+import { createPlaceService } from './place-service';
+import { createRunService } from './run-service';
+import { createServiceService } from './service-service';
 import { createSessionService } from './session-service';
+import { createSpecificationService } from './specification-service';
 
 /** What of the configuration the services need to know. */
 export type ServiceSettings = { bcryptCost: number; publicUrl: string };
@@ -15,6 +24,15 @@ export function createServices({ withFirm, doors, clock, settings }: ServicePart
   return {
     session: createSessionService({ withFirm, doors, clock, bcryptCost }),
     member: createMemberService({ withFirm, doors, bcryptCost }),
+    job: createJobService({ withFirm }),
+    contact: createContactService({ withFirm }),
+    basis: createBasisService({ withFirm }),
+    place: createPlaceService({ withFirm }),
+    service: createServiceService({ withFirm }),
+    buildUp: createBuildUpService({ withFirm }),
+    specification: createSpecificationService({ withFirm }),
+    run: createRunService({ withFirm }),
+    library: createLibraryService(),
   };
 }
 export type Services = ReturnType<typeof createServices>;

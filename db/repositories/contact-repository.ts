@@ -20,8 +20,9 @@ export function createContactRepository(transaction: Knex.Transaction, firmId: s
         .select('c.*');
       return rows.map(toContact);
     },
-    async find(id: string): Promise<Contact | undefined> {
-      const row: ContactRow | undefined = await contacts().where({ id }).first();
+    /** Holds the contact for this transaction, so that its version stays what it is. */
+    async hold(id: string): Promise<Contact | undefined> {
+      const row: ContactRow | undefined = await contacts().where({ id }).forUpdate().first();
       return row && toContact(row);
     },
     /** Which of these ids this firm knows. */

@@ -62,6 +62,10 @@ export function createJobRepository(transaction: Knex.Transaction, firmId: strin
         .select('jobs.*', transaction.raw('coalesce(runs, 0) as runs, coalesce(on_hold, 0) as on_hold'));
       return rows.map(toSummary);
     },
+    async exists(id: string): Promise<boolean> {
+      const row: unknown = await jobs().where({ id }).select('id').first();
+      return row !== undefined;
+    },
     /** Holds the job for this transaction, so that checks and writes of its rows cannot be overtaken. */
     async hold(id: string): Promise<boolean> {
       const row: unknown = await jobs().where({ id }).forNoKeyUpdate().select('id').first();

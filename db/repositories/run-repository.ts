@@ -31,10 +31,6 @@ export function createRunRepository(transaction: Knex.Transaction, firmId: strin
       const rows: RunRow[] = await runsOf(jobId).orderBy('entered');
       return rows.map(toRun);
     },
-    async find(jobId: string, id: string): Promise<Run | undefined> {
-      const row: RunRow | undefined = await runsOf(jobId).where({ id }).first();
-      return row && toRun(row);
-    },
     async among(jobId: string, ids: readonly string[]): Promise<Run[]> {
       const rows: RunRow[] = await runsOf(jobId).whereIn('id', ids);
       return rows.map(toRun);

@@ -3,6 +3,12 @@ import type { Knex } from 'knex';
 import { createJobRows, type JobRows, type RowSeen, type RowShape } from './job-rows';
 
 type Scope = { id: string; placeIds: string[] };
+type Count = { count: number };
+/** Rows that apply in places; says how many of them refer to a service or a place. */
+export type ScopedRows<Input, Contract> = JobRows<Input, Contract> & {
+  countOfService(jobId: string, serviceId: string): Promise<number>;
+  countOfPlace(jobId: string, placeId: string): Promise<number>;
+};
 type Link = { row_id: string; place_id: string };
 
 /** Rows of a job that apply in some of its places: the places stand in a table of their own. */
@@ -10,7 +16,7 @@ export function createScopedRows<Row, Input extends { placeIds: string[] }, Cont
   transaction: Knex.Transaction,
   firmId: string,
   shape: RowShape<Row, Input, Contract>,
-): JobRows<Input, Contract> {
+): ScopedRows<Input, Contract> {
   const rows = createJobRows(transaction, firmId, shape);
   const links = `${shape.table}_places`;
   const linksOf = (jobId: string) => transaction(links).where({ firm_id: firmId, job_id: jobId });
@@ -46,6 +52,16 @@ export function createScopedRows<Row, Input extends { placeIds: string[] }, Cont
     async update(jobId: string, seen: RowSeen, input: Input) {
       const row = await rows.update(jobId, seen, input);
       return row && setPlaces(jobId, row, input.placeIds);
+    },
+    async countOfService(jobId, serviceId) {
+      const found: Count[] = await transaction(shape.table)
+        .where({ firm_id: firmId, job_id: jobId, service_id: serviceId })
+        .count();
+      return found[0]!.count;
+    },
+    async countOfPlace(jobId, placeId) {
+      const found: Count[] = await linksOf(jobId).where({ place_id: placeId }).count();
+      return found[0]!.count;
     },
   };
 }

@@ -11,7 +11,7 @@ export function parse<Shape>(schema: z.ZodType<Shape>, value: unknown): Shape {
 
 /** An id in the path: what cannot be an id is an id that nobody has. */
 export function idOf(request: Request, name = 'id'): string {
-  const id = z.uuid().safeParse(request.params[name]);
+  const id = z.uuid().toLowerCase().safeParse(request.params[name]);
   if (!id.success) throw new AppError('not-found');
   return id.data;
 }
