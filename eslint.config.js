@@ -87,6 +87,6 @@ module.exports = defineConfig([
   },
   {
     files: ['**/*.{js,mjs}', '__tests__/support/**'],
-    languageOptions: { globals: { __dirname: 'readonly', fetch: 'readonly' } },
+    languageOptions: { globals: { __dirname: 'readonly', fetch: 'readonly', Buffer: 'readonly' } },
   },
 ]);
