@@ -94,5 +94,6 @@ function bandOf(row: BandRow): CodeBand {
   return { ...row, conductivity: [low, high] };
 }
 
-const ductsOf = (id: string): CodeDuctTable =>
-  ductTables[oneOf(['ashrae-90.1-2010', 'ashrae-90.1-2016', 'iecc'] as const, id)];
+function ductsOf(id: string): CodeDuctTable {
+  return ductTables[oneOf(['ashrae-90.1-2010', 'ashrae-90.1-2016', 'iecc'] as const, id)];
+}
