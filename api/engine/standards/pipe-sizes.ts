@@ -40,8 +40,9 @@ function sizesOf(standard: PipeStandard): PipeSize[] {
   }));
 }
 
-const wallsOf = (names: readonly string[], walls: readonly (number | null)[]) =>
-  names.flatMap((name, place) => {
+function wallsOf(names: readonly string[], walls: readonly (number | null)[]): PipeSize['walls'] {
+  return names.flatMap((name, place) => {
     const thickness = walls[place];
     return thickness ? [{ name, thickness: metres(thickness) }] : [];
   });
+}
