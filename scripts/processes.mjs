@@ -31,7 +31,8 @@ export const run = (program, args, env = process.env) =>
     child.once('close', (status) => {
       if (status === 0) return resolve(said.stdout);
       const words = (said.stderr.trim() || said.stdout.trim()).slice(-4000);
-      reject(new Error(words || `${path.basename(program)} ${args.join(' ')} failed (${status})`));
+      const error = new Error(words || `${path.basename(program)} ${args.join(' ')} failed (${status})`);
+      reject(Object.assign(error, { stdout: said.stdout }));
     });
   });
 

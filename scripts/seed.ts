@@ -1,13 +1,15 @@
-// The demo, once: does nothing when its firm is there. Prints who can sign in, a line each.
+// The demo: enters what is not there yet. Prints who can sign in, a line each.
 import { systemClock } from '@/api/adapters/clock';
 import { readConfig } from '@/api/config';
+import type { Member } from '@/api/contracts/session';
 import { createLogger } from '@/api/logger';
 import { startQueue } from '@/api/queue/queue';
-import { wireServices } from '@/api/wiring';
+import type { Services } from '@/api/services/services';
+import { wireServices, wireTogether } from '@/api/wiring';
 import { connect } from '@/db/connection';
-import { createDoors } from '@/db/repositories/doors';
-import { demoOwner, seedDemo } from '@/db/seeds/demo';
-import { createWithFirm } from '@/db/with-firm';
+import { createDoors, type Doors } from '@/db/repositories/doors';
+import { seedDemo } from '@/db/seeds/demo';
+import { demoOwner } from '@/db/seeds/demo/people';
 
 async function main(): Promise<void> {
   const config = readConfig(process.env);
@@ -15,20 +17,28 @@ async function main(): Promise<void> {
   if (!config.demo || !password) throw new Error('The demo is loaded only with DEMO=on and a DEMO_PASSWORD.');
   const db = connect(config.databaseUrl, 4);
   const boss = await startQueue(config.databaseUrl, { works: false, logger: createLogger(config.logLevel) });
+  const parts = { db, boss, config };
+  const { member, session } = wireServices(parts);
+  const findOwner = () => find(createDoors(db), session);
   try {
-    const found = await createDoors(db).signIn(demoOwner.email);
-    if (!found) await seedDemo({ services: wireServices({ db, boss, config }), clock: systemClock, password });
-    const firm = found ?? (await createDoors(db).signIn(demoOwner.email));
-    if (!firm) throw new Error('The demo has no owner');
-    const people = await createWithFirm({ db, boss })(firm.firm_id, ({ members }) => members.list());
-    for (const { email, role, maySend } of people) {
-      console.log(`${email}  ${role}${role === 'estimator' ? (maySend ? ', may send' : ', may not send') : ''}`);
-    }
+    const owner = await findOwner();
+    await seedDemo({ owner, member, together: wireTogether(parts), clock: systemClock, password }).finally(async () => {
+      const founded = owner ?? (await findOwner());
+      if (founded) for (const person of await member.list(founded)) console.log(describe(person));
+    });
   } finally {
     await boss.stop({ graceful: false });
     await db.destroy();
   }
 }
+
+async function find(doors: Doors, session: Services['session']): Promise<Member | undefined> {
+  const account = await doors.signIn(demoOwner.email);
+  return account && session.member(account.firm_id, account.account_id);
+}
+
+const describe = ({ email, role, maySend }: Member) =>
+  `${email}  ${role}${role === 'estimator' ? `, ${maySend ? 'may' : 'may not'} send` : ''}`;
 
 main().catch((error: unknown) => {
   console.error(error instanceof Error ? error.message : error);

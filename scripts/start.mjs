@@ -48,7 +48,7 @@ async function main() {
   if (!dev) await step('Web app', async (note) => (await import('./web/build.mjs')).buildWeb(note));
   if (ports.smtp) await step('Mail', () => startMail(ports, env));
   await step('Server and worker', () => startServers(ports, env));
-  const people = env.DEMO === 'on' ? await step('Demo', () => script('scripts/seed.ts', env)) : '';
+  const people = env.DEMO === 'on' ? await step('Demo', () => loadDemo(env)) : '';
   sayWhere(ports, people.trim().split('\n').filter(Boolean));
 }
 
@@ -93,6 +93,13 @@ async function startServers({ web, api }, env) {
   part('web app', metro, { ...local, ...offline });
   await ready(web);
 }
+
+/** A demo that cannot be loaded is said, and no reason to stop what runs. */
+const loadDemo = (env) =>
+  script('scripts/seed.ts', env).catch((error) => {
+    if (!ending) console.error(`\nThe demo is not complete: ${error.message}`);
+    return error.stdout ?? '';
+  });
 
 async function ready(port) {
   for (let attempt = 0; attempt < 600 && !ending; attempt += 1) {

@@ -73,7 +73,7 @@ async function givenPort(variable, given) {
 }
 
 async function nextFree(from) {
-  if (from === 0) return listen(0);
+  if (from === 0) return freePort();
   for (let port = from; port < from + 200; port += 1) if (await isFree(port)) return port;
   throw new Error(`No port from ${from} to ${from + 199} is free.`);
 }
@@ -83,6 +83,8 @@ const isFree = (port) =>
     () => true,
     () => false,
   );
+
+export const freePort = () => listen(0);
 
 const listen = (wanted) =>
   new Promise((resolve, reject) => {
