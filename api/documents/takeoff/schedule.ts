@@ -1,0 +1,89 @@
+import type { ScheduleRow } from '@/api/contracts/schedule';
+import { closePart, openPart, paragraph } from '@/api/documents/press/flow';
+import { styles } from '@/api/documents/press/ink';
+import { piece, printTable, stack, text, type Cell, type Piece, type Row } from '@/api/documents/press/table';
+
+import { destinationOf, numbersFor } from './clarifications';
+import { numberRanges } from './number-ranges';
+import { inchesOf, retarderWords, sizesAndThickness, sourceWords, thicknessOf } from './schedule-words';
+import { drawSection, fitting } from './section-picture';
+import type { Sheet } from './sheet';
+
+/** Thickness by service, size and place, each with its source and what decides it. */
+export function printSchedule(sheet: Sheet): void {
+  const { flow, snapshot } = sheet;
+  openPart(flow, 'Schedule of insulation', 220);
+  const words =
+    'Thickness by service, size and place, each with the limit that decides it. Drawings are to scale, each for itself; every material has its own hatch.';
+  paragraph(flow, words, { style: styles.bodySoft });
+  if (snapshot.schedule.rows.length === 0) paragraph(flow, 'Nothing is insulated yet.', { style: styles.body });
+  else {
+    flow.y += 8;
+    printTable(flow, {
+      caption: 'Schedule of insulation',
+      columns,
+      rows: snapshot.schedule.rows.map((row) => scheduleRow(sheet, row)),
+    });
+  }
+  closePart(flow);
+}
+
+const glyph = 36;
+const columns = [
+  { title: '', width: glyph },
+  { title: 'Service and size', share: 1.1 },
+  { title: 'Place and runs', share: 1 },
+  { title: 'Material and finish', share: 1.1 },
+  { title: 'mm', width: 54, align: 'right' as const },
+  { title: 'From, and what decides', share: 1.2 },
+];
+
+function scheduleRow(sheet: Sheet, row: ScheduleRow): Row {
+  const { locale } = sheet;
+  const operating = row.operating.map((value) => locale.quantity('temperature', value, 0)).join(' / ');
+  return {
+    cells: [
+      picture(sheet, row),
+      stack(
+        piece(row.service, styles.cellStrong),
+        piece(row.sizes.join(', ')),
+        operating ? piece(`operating ${operating} °C`, styles.cellSoft) : null,
+      ),
+      stack(piece(row.places.join(', ') || '–'), piece(numberRanges(row.runNumbers), styles.cellSoft)),
+      materials(row),
+      stack(piece(thicknessOf(row), styles.thickness), inchesOf(row) ? piece(inchesOf(row), styles.cellSoft) : null),
+      decides(sheet, row),
+    ],
+  };
+}
+
+function picture({ flow }: Sheet, row: ScheduleRow): Cell {
+  const { section } = row;
+  if (!section) return text('');
+  const half = glyph / 2;
+  const draw = (x: number, y: number) =>
+    drawSection(flow.document, section, { x: x + half, y: y + half, scale: fitting(section, glyph - 2) });
+  return { picture: { alt: `Section: ${sizesAndThickness(row).replace('\n', ', ')}`, height: glyph, draw } };
+}
+
+function materials({ layers, finish, vapourRetarder }: ScheduleRow): Cell {
+  const names = [...new Set(layers.map(({ material }) => material))];
+  const words = retarderWords[vapourRetarder];
+  return stack(
+    ...names.map((name) => piece(layers.length > 1 && names.length === 1 ? `${name}, ${layers.length} layers` : name)),
+    piece(finish, styles.cellSoft),
+    words ? piece(words, styles.cellSoft) : null,
+  );
+}
+
+function decides({ clarifications, locale }: Sheet, row: ScheduleRow): Cell {
+  const links: Piece[] = numbersFor(clarifications, row.runIds).map((number) =>
+    piece(`clarification ${number}`, styles.cellLink, destinationOf(number)),
+  );
+  return stack(
+    piece(sourceWords(row)),
+    piece(locale.words(row.decides), styles.cellSoft),
+    ...row.reasons.map((reason) => piece(reason, styles.cellSoft)),
+    ...links,
+  );
+}
