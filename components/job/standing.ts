@@ -45,11 +45,21 @@ export function flaggedRuns(runs: readonly Run[], judgement: Judgement): Flagged
 export function revisionText(revision: Revision, timeZone: string): string {
   const day = dayText(revision.frozenAt, timeZone);
   const sent = revision.messages.filter(({ state }) => state === 'sent').length;
-  const went = sent > 0 ? `sent to ${sent === 1 ? revision.messages.find(({ state }) => state === 'sent')!.to.name : plural(sent, 'person', 'people')}` : 'not sent yet';
+  const went =
+    sent > 0
+      ? `sent to ${sent === 1 ? revision.messages.find(({ state }) => state === 'sent')!.to.name : plural(sent, 'person', 'people')}`
+      : 'not sent yet';
   return `Revision ${revision.letter} was frozen on ${day} by ${revision.frozenBy}; ${went}.`;
 }
 
 export const dayText = (instant: string, timeZone: string): string =>
-  new Intl.DateTimeFormat('en-GB', { timeZone, day: 'numeric', month: 'long', hour: '2-digit', minute: '2-digit', hourCycle: 'h23' })
+  new Intl.DateTimeFormat('en-GB', {
+    timeZone,
+    day: 'numeric',
+    month: 'long',
+    hour: '2-digit',
+    minute: '2-digit',
+    hourCycle: 'h23',
+  })
     .format(new Date(instant))
     .replace(' at ', ', ');

@@ -5,7 +5,12 @@ import type { Service } from '@/api/contracts/service';
 import { plural } from './due-words';
 
 /** What of a job may stand on another row; what is not read yet is left out. */
-export type UsingRows = { runs?: Run[]; buildUps?: BuildUp[]; specification?: SpecificationRow[]; services?: Service[] };
+export type UsingRows = {
+  runs?: Run[];
+  buildUps?: BuildUp[];
+  specification?: SpecificationRow[];
+  services?: Service[];
+};
 export type Used = { by: 'placeId' | 'serviceId' | 'levelId' | 'drawingId'; id: string };
 
 /** What stands on a row, so that it cannot be taken away: one line for each kind. */
