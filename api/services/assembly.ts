@@ -2,10 +2,10 @@ import type { BodyKind, BuildUp, Layer, SpecificationRow } from '@/api/contracts
 import type { JobData } from '@/api/contracts/job-data';
 import type { Override, Run, ShapeKind } from '@/api/contracts/run';
 import type { Assembly } from '@/api/contracts/study';
+import { finish, material } from '@/api/engine/standards/library';
 import type { VapourRetarder } from '@/api/engine/standards/rows';
 
 import { dnOf } from './sizes';
-import { finishOf, materialOf } from './standard-rows';
 
 /** With what a run is insulated, before its thickness is studied. */
 export type Assembled = {
@@ -100,11 +100,11 @@ export function toAssembly(assembled: Assembled, names: readonly Layer['thicknes
     reason: assembled.reason,
     layers: assembled.layers.map(({ materialId, thickness }, index) => ({
       materialId,
-      materialName: materialOf(materialId).name,
+      materialName: material(materialId).name,
       thickness: names[index] ?? thickness,
     })),
     finishId: assembled.finishId,
-    finishName: finishOf(assembled.finishId).name,
+    finishName: finish(assembled.finishId).name,
     vapourRetarder: assembled.vapourRetarder,
     codeExempt: assembled.codeExempt,
   };

@@ -4,10 +4,10 @@ import type { Run, Shape } from '@/api/contracts/run';
 import type { FluidStateOfService, Service, ServiceLimit } from '@/api/contracts/service';
 import { EngineError } from '@/api/engine/engine-error';
 import type { Body, Conditions, FluidState, LimitInput, PlaceInput, StudyInput } from '@/api/engine/limits/study-types';
+import { finish, material } from '@/api/engine/standards/library';
 
 import type { Assembled } from './assembly';
 import { standardSize } from './sizes';
-import { finishOf, materialOf } from './standard-rows';
 
 /** What the engine is asked about a run; null for a counted piece, which has no shape to judge. */
 export function studyInput(data: JobData, run: Run, assembled: Assembled): StudyInput | null {
@@ -18,11 +18,11 @@ export function studyInput(data: JobData, run: Run, assembled: Assembled): Study
   return {
     body,
     layers: assembled.layers.map(({ materialId, thickness, installed }) => ({
-      material: materialOf(materialId),
+      material: material(materialId),
       thickness,
       installed: installed?.value ?? null,
     })),
-    finish: finishOf(assembled.finishId),
+    finish: finish(assembled.finishId),
     vapourRetarder: assembled.vapourRetarder,
     states: (run.override?.state ? [run.override.state] : service.states).map(fluidState),
     place: placeInput(found(data.places, run.placeId, 'place')),

@@ -129,7 +129,7 @@ export const demoLevel2Runs: DemoRun[] = [
     length: '34',
     elevation: '3.8',
     fittings: { 'elbow-90': 8, tee: 4, 'flanged-valve': 4, 'flange-pair': 4, hanger: 15 },
-    override: departure('Return main, 12 C by the chiller schedule', { state: coldState([12, 10, 15]) }),
+    override: departure('Return main, 12 °C by the chiller schedule', { state: coldState([12, 10, 15]) }),
     note: 'Return main',
   }),
   pipe({
