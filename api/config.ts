@@ -45,7 +45,7 @@ export type SmtpSettings = { host: string; port: number; secure: boolean; user?:
 export type Config = ReturnType<typeof toConfig>;
 
 /** Parsed once, at the start. @throws Error with one sentence for each thing that is wrong */
-export function readConfig(environment: NodeJS.ProcessEnv): Config {
+export function readConfig(environment: Record<string, string | undefined>): Config {
   const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
   const parsed = environmentSchema.safeParse(given);
   if (!parsed.success) {
