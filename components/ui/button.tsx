@@ -28,20 +28,9 @@ export type ButtonProps = {
   name?: string;
 };
 
-export function Button(props: ButtonProps) {
-  const {
-    label,
-    onPress,
-    tone = 'quiet',
-    busy = false,
-    busyLabel = label,
-    disabled,
-    submit,
-    full,
-    large,
-    name,
-  } = props;
+export function Button({ label, onPress, tone = 'quiet', submit, name, ...props }: ButtonProps) {
   const theme = useTheme();
+  const { busy, busyLabel, disabled, full, large } = props;
   return (
     <Element
       tag="button"
@@ -50,19 +39,16 @@ export function Button(props: ButtonProps) {
       aria-busy={busy}
       aria-disabled={busy || undefined}
       disabled={disabled}
-      onClick={(event) => {
-        if (busy) event.preventDefault();
-        else onPress?.();
-      }}
+      onClick={(event) => (busy ? event.preventDefault() : onPress?.())}
       style={[
-        styles.button,
+        buttonShape.button,
         toneStyle(theme, tone),
         full && styles.full,
         large && styles.large,
         (busy || disabled) && styles.dim,
       ]}
     >
-      {busy ? busyLabel : label}
+      {(busy && busyLabel) || label}
     </Element>
   );
 }
@@ -101,7 +87,6 @@ export const buttonShape = StyleSheet.create({
 });
 
 const styles = StyleSheet.create({
-  button: buttonShape.button,
   full: { alignSelf: 'stretch', flexGrow: 1 },
   large: { minHeight: fieldTarget, fontSize: type.lead.fontSize },
   dim: { opacity: 0.6 },

@@ -59,17 +59,14 @@ const styles = StyleSheet.create({
   noWrap: webStyle({ whiteSpace: 'nowrap' }),
 });
 
+type WordsProps = Pick<TextProps, 'children' | 'tone' | 'weight' | 'numeric' | 'noWrap' | 'decorative'>;
+
 /** Words inside a Text that differ from it: they take size and colour from around them unless told. */
-export function Words({
-  children,
-  tone,
-  weight,
-  numeric,
-  noWrap,
-}: Pick<TextProps, 'children' | 'tone' | 'weight' | 'numeric' | 'noWrap'>) {
+export function Words({ children, tone, weight, numeric, noWrap, decorative }: WordsProps) {
   const theme = useTheme();
   return (
     <NativeText
+      aria-hidden={decorative}
       style={[
         tone && { color: theme[tone] },
         weight && { fontWeight: weights[weight] },
