@@ -14,7 +14,7 @@ module.exports = async function globalSetup() {
   const database = `test_${process.pid}`;
   globalThis.testDatabase = { ownerUrl, database, release: postgres.release };
   try {
-    await clone(ownerUrl, database);
+    process.env.TEMPLATE_DATABASE = await clone(ownerUrl, database);
   } catch (error) {
     await postgres.release();
     throw error;
@@ -32,13 +32,14 @@ async function clone(ownerUrl, database) {
   if (rowCount === 0) await makeTemplate(owner, template, ownerUrl);
   await owner.query(`create database ${database} template ${template}`);
   await owner.end();
+  return template;
 }
 
 /** Databases of runs that were killed. */
 async function dropLeftovers(owner) {
-  const { rows } = await owner.query("select datname from pg_database where datname ~ '^test_[0-9]+$'");
+  const { rows } = await owner.query("select datname from pg_database where datname ~ '^test_[0-9]+(_[0-9a-f]+)?$'");
   for (const { datname } of rows) {
-    if (!fs.existsSync(`/proc/${datname.slice(5)}`))
+    if (!fs.existsSync(`/proc/${datname.split('_')[1]}`))
       await owner.query(`drop database if exists ${datname} with (force)`);
   }
 }
