@@ -18,6 +18,7 @@ import { runRoutes } from '@/api/routes/run-routes';
 import { serviceRoutes } from '@/api/routes/service-routes';
 import { sessionRoutes } from '@/api/routes/session-routes';
 import { specificationRoutes } from '@/api/routes/specification-routes';
+import { studyRoutes } from '@/api/routes/study-routes';
 import type { Services } from '@/api/services/services';
 
 export type AppParts = {
@@ -55,6 +56,7 @@ function routes(services: Services, signInLimit: Limit): Router {
   router.use(jobRoutes(services.job), contactRoutes(services.contact), basisRoutes(services.basis));
   router.use(placeRoutes(services.place), serviceRoutes(services.service), buildUpRoutes(services.buildUp));
   router.use(specificationRoutes(services.specification), runRoutes(services.run), libraryRoutes(services.library));
+  router.use(studyRoutes(services.study));
   return router;
 }
 

@@ -4,7 +4,7 @@ import type { Words, WordsKind } from '@/api/engine/words';
 
 /** What falls short and what would meet it: "Surface 63.1 °C, limit 60 °C. 51 mm meets it." */
 export function limitFlagWords(verdict: LimitVerdict, meeting: readonly ThicknessName[] | null): Words {
-  if (verdict.verdict === 'cannot-tell') return ['Cannot tell: ', ...verdict.because];
+  if (verdict.verdict === 'cannot-tell') return ['Cannot tell: ', ...verdict.because, '.'];
   return [...shortfall(verdict), ' ', ...whatMeets(meeting)];
 }
 
@@ -14,8 +14,14 @@ const whatMeets = (meeting: readonly ThicknessName[] | null): Words =>
 function shortfall(verdict: LimitVerdict): Words {
   const { kind, value, limit, margin, unit } = verdict;
   if (kind === 'dew-point') return dewPointWords(verdict);
-  if (value === null || limit === null || unit === null || kind === 'material') return [...verdict.because, '.'];
-  const compared = (name: string): Words => [name, number(unit, Math.abs(value)), ', limit ', number(unit, limit), '.'];
+  if (value === null || limit === null || unit === null || kind === 'material') return sentence(verdict.because);
+  const compared = (name: string): Words => [
+    name,
+    number(unit, Math.abs(value)),
+    ', limit ',
+    entered(unit, limit),
+    '.',
+  ];
   if (kind === 'touch') return compared('Surface ');
   if (kind === 'heat-flow') return compared('Heat flow ');
   if (unit === 'dimension')
@@ -24,7 +30,7 @@ function shortfall(verdict: LimitVerdict): Words {
 }
 
 function dewPointWords({ value, dewPoint, margin, state, sweatsFrom, because }: LimitVerdict): Words {
-  if (value === null || dewPoint === null || margin === null) return [...because, '.'];
+  if (value === null || dewPoint === null || margin === null) return sentence(because);
   const above = value - dewPoint;
   if (state !== 'sweats')
     return [
@@ -33,7 +39,7 @@ function dewPointWords({ value, dewPoint, margin, state, sweatsFrom, because }: 
       ' above the dew point of ',
       number('temperature', dewPoint),
       ', limit ',
-      number('difference', above - margin),
+      entered('difference', above - margin),
       '.',
     ];
   const begins: Words = sweatsFrom === null ? [] : [' Sweating begins at ', number('humidity', sweatsFrom), '.'];
@@ -47,4 +53,13 @@ function dewPointWords({ value, dewPoint, margin, state, sweatsFrom, because }: 
   ];
 }
 
+function sentence([first = '', ...rest]: Words): Words {
+  const start = typeof first === 'string' ? first.charAt(0).toUpperCase() + first.slice(1) : first;
+  return [start, ...rest, '.'];
+}
+
 const number = (kind: WordsKind, value: number): Words[number] => ({ kind, value });
+
+/** A limit entered as a whole number is said as one. */
+const entered = (kind: WordsKind, value: number): Words[number] =>
+  Math.abs(value - Math.round(value)) < 1e-6 ? { kind, value, digits: 0 } : number(kind, value);

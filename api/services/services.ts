@@ -13,6 +13,7 @@ import { createRunService } from './run-service';
 import { createServiceService } from './service-service';
 import { createSessionService } from './session-service';
 import { createSpecificationService } from './specification-service';
+import { createStudyService } from './study-service';
 
 /** What of the configuration the services need to know. */
 export type ServiceSettings = { bcryptCost: number; publicUrl: string };
@@ -32,6 +33,7 @@ export function createServices({ withFirm, doors, clock, settings }: ServicePart
     buildUp: createBuildUpService({ withFirm }),
     specification: createSpecificationService({ withFirm }),
     run: createRunService({ withFirm }),
+    study: createStudyService({ withFirm }),
     library: createLibraryService(),
   };
 }
