@@ -64,7 +64,7 @@ export const marksOf: Record<Pattern, Draw> = {
   crosses: (box, pitch) => onlyLines([...slanted(box, 1.3 * pitch, 1), ...slanted(box, 1.3 * pitch, -1)]),
   dashes: (box, pitch) =>
     onlyLines(
-      staggered(box, 0.55 * pitch).map(([x, y]) => [
+      staggered(box, 0.6 * pitch).map(([x, y]) => [
         [x - 0.2 * pitch, y],
         [x + 0.2 * pitch, y],
       ]),

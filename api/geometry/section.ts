@@ -11,7 +11,7 @@ export type SectionInput = {
   nature: 'hot' | 'cold';
 };
 
-export type DrawnLayer = { materialId: string; pattern: Pattern; outline: string; hatch: string };
+export type DrawnLayer = { materialId: string; pattern: Pattern; outline: string; hatch: string; hatchPen: number };
 
 /** Paths in a square of `size`, and the widths of the pens for them; every hatch is a stroke with round ends. */
 export type SectionDrawing = {
@@ -67,7 +67,7 @@ type Sheet = { size: number; scale: number };
 function draw(drawn: SectionInput, { size, scale }: Sheet): SectionDrawing {
   const outlines = outlinesOf(drawn, { size, scale });
   const [bore, outside] = [outlines[0]!, outlines.at(-1)!];
-  const pitch = pitchOf(size);
+  const [pitch, pens] = [pitchOf(size), pensOf(size)];
   return {
     size: rounded(size),
     scale,
@@ -76,12 +76,16 @@ function draw(drawn: SectionInput, { size, scale }: Sheet): SectionDrawing {
     layers: drawn.layers.map(({ materialId }, index) => {
       const region = regionOf(drawn, outlines[index]!, outlines[index + 1]!);
       const pattern = patternOf(materialId);
-      return { materialId, pattern, outline: outlinePath(region.outer), hatch: layerHatch(region, pattern, pitch) };
+      const hatched = {
+        hatch: layerHatch(region, pattern, pitch),
+        hatchPen: pattern === 'dots' ? 2 * pens.hatch : pens.hatch,
+      };
+      return { materialId, pattern, outline: outlinePath(region.outer), ...hatched };
     }),
     jacket: drawn.shape === 'wall' ? faceOf(boxOf(outside)) : outlinePath(outside),
     box: wholeBox(drawn, outlines),
     interfaces: outlines.map((outline) => rounded(boxOf(outline).x + boxOf(outline).width)),
-    pens: pensOf(size),
+    pens,
   };
 }
 
