@@ -55,6 +55,7 @@ function tried(wall: Wall, exchange: Exchange, { flow, bounds }: { flow: number;
 }
 
 function isBalanced({ flow, residual }: Trial, noise: number): boolean {
+  if (!Number.isFinite(residual)) return false;
   return Math.abs(residual) <= Math.max(tolerance * Math.max(Math.abs(flow), Math.abs(flow - residual)), noise);
 }
 

@@ -2,7 +2,7 @@ import { conductivityAt } from '../heat/conductivity';
 import { type CodeBand, codeColumns, type CodeEdition } from '../standards/energy-codes';
 import { findPipeSize } from '../standards/pipe-sizes';
 import type { Curve } from '../standards/rows';
-import { nominalThickness, type ThicknessName } from '../standards/thickness-name';
+import type { ThicknessName } from '../standards/thickness-name';
 import type { Words } from '../words';
 import { type Build, wholeThickness } from './build';
 import type { Body, FluidState, LimitVerdict } from './study-types';
@@ -106,7 +106,7 @@ function judgeByName(build: Build, edition: CodeEdition, { asked }: Row): LimitV
   });
 }
 
-const inchesOf = (name: ThicknessName): number => nominalThickness(name) / inch;
+const inchesOf = (name: ThicknessName): number => Number(name.slice('in:'.length));
 const put = ({ names }: Build): Words[number] => (names.length === 0 ? 'none' : { thickness: names });
 
 function judgeByActual(

@@ -3,7 +3,7 @@ import type { HeatCase, HeatResult } from '../heat/heat-case';
 import { solve } from '../heat/solve';
 import { bareSurface } from './bare-surface';
 import { type Build, wholeThickness } from './build';
-import type { Body, ConditionSet, HeatAnswer, JudgedAt, StudyInput } from './study-types';
+import type { Body, ConditionSet, HeatAnswer, JudgedAt, Orientation, StudyInput } from './study-types';
 
 /** What a surface is asked under: a fluid temperature [°C], a set of air, and which emittance. */
 export type Asked = { fluid: number; set: ConditionSet; emittance: 'new' | 'aged'; isStill?: boolean };
@@ -18,14 +18,15 @@ export type Solved = { result: HeatResult; heatCase: HeatCase; judgedAt: JudgedA
 
 export function trialOf(input: StudyInput, build: Build): Trial {
   const solved: Solved[] = [];
+  const shape = heatShapeOf(input.body, build);
   return {
     input,
     build,
     solve: (asked) => {
       const judgedAt = judgedAtOf(input, build, asked);
       const known = solved.find((other) => isSameCase(other.judgedAt, judgedAt));
-      if (known) return { ...known, judgedAt };
-      const heatCase = heatCaseOf(input, build, judgedAt);
+      if (known) return { result: known.result, heatCase: known.heatCase, judgedAt };
+      const heatCase = heatCaseOf(input, shape, judgedAt);
       const fresh = { result: solveNamed(input, judgedAt, heatCase), heatCase, judgedAt };
       solved.push(fresh);
       return fresh;
@@ -43,42 +44,53 @@ function judgedAtOf({ place, finish, body }: StudyInput, build: Build, asked: As
   return { set: asked.set, fluid: asked.fluid, air, humidity, wind: asked.isStill ? 0 : wind, emittance, source };
 }
 
-/** The case as the heat engine takes it: a rectangular duct is its vertical side at insulated height. */
-export function heatCaseOf({ body, altitude, method }: StudyInput, build: Build, at: JudgedAt): HeatCase {
-  return {
-    ...shapeOf(body, wholeThickness(build)),
-    layers: build.thicknesses.map((thickness, place) => ({
-      thickness,
-      conductivity: build.materials[place]?.curve.points ?? [],
-    })),
-    operatingTemperature: at.fluid,
-    airTemperature: at.air,
-    emittance: at.emittance,
-    windSpeed: at.wind,
-    altitude,
-    surface: method,
-  };
-}
+type HeatShapeOfBody = Pick<HeatCase, 'shape' | 'outsideDiameter' | 'height' | 'layers'>;
 
-function shapeOf(body: Body, thickness: number): Pick<HeatCase, 'shape' | 'outsideDiameter' | 'height'> {
+/** What stays the same from case to case. A rectangular duct is its vertical side at insulated height. */
+export function heatShapeOf(body: Body, build: Build): HeatShapeOfBody {
+  const layers = build.thicknesses.map((thickness, place) => ({
+    thickness,
+    conductivity: build.materials[place]?.curve.points ?? [],
+  }));
+  const thickness = wholeThickness(build);
   switch (body.shape) {
     case 'pipe':
-      return cylinder(body.orientation, body.outsideDiameter, body.height);
+      return cylinder(body, { outsideDiameter: body.outsideDiameter, height: body.height ?? undefined, layers });
     case 'round-duct':
-      return { shape: 'horizontal-cylinder', outsideDiameter: body.diameter };
+      return { shape: 'horizontal-cylinder', outsideDiameter: body.diameter, height: undefined, layers };
     case 'rectangular-duct':
-      return { shape: 'vertical-flat', height: body.height + 2 * thickness };
+      return { shape: 'vertical-flat', outsideDiameter: undefined, height: body.height + 2 * thickness, layers };
     case 'vessel':
-      return cylinder(body.orientation, body.diameter, body.length + 2 * thickness);
+      return cylinder(body, { outsideDiameter: body.diameter, height: body.length + 2 * thickness, layers });
     case 'flat':
-      return { shape: 'vertical-flat', height: body.height };
+      return { shape: 'vertical-flat', outsideDiameter: undefined, height: body.height, layers };
   }
 }
 
-function cylinder(orientation: 'horizontal' | 'vertical', outsideDiameter: number, height: number | null) {
-  if (orientation === 'horizontal') return { shape: 'horizontal-cylinder', outsideDiameter } as const;
-  return { shape: 'vertical-cylinder', outsideDiameter, height: height ?? undefined } as const;
-}
+const cylinder = (
+  { orientation }: { orientation: Orientation },
+  { outsideDiameter, height, layers }: Omit<HeatShapeOfBody, 'shape'>,
+): HeatShapeOfBody =>
+  orientation === 'horizontal'
+    ? { shape: 'horizontal-cylinder', outsideDiameter, height: undefined, layers }
+    : { shape: 'vertical-cylinder', outsideDiameter, height, layers };
+
+export const heatCaseOf = (
+  { altitude, method }: StudyInput,
+  { shape, outsideDiameter, height, layers }: HeatShapeOfBody,
+  at: JudgedAt,
+): HeatCase => ({
+  shape,
+  outsideDiameter,
+  height,
+  layers,
+  operatingTemperature: at.fluid,
+  airTemperature: at.air,
+  emittance: at.emittance,
+  windSpeed: at.wind,
+  altitude,
+  surface: method,
+});
 
 function solveNamed({ place }: StudyInput, { set }: JudgedAt, heatCase: HeatCase): HeatResult {
   try {

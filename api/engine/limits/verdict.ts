@@ -2,44 +2,34 @@ import type { Words, WordsKind } from '../words';
 import type { LimitKind, LimitVerdict, StudyInput } from './study-types';
 
 type Details = Partial<Omit<LimitVerdict, 'kind' | 'verdict' | 'because'>>;
+type Answer = Pick<LimitVerdict, 'kind' | 'verdict' | 'because'>;
 
-const blank = {
-  value: null,
-  limit: null,
-  margin: null,
-  unit: null,
-  state: null,
-  dewPoint: null,
-  sweatsFrom: null,
-  judgedAt: null,
-  source: '',
-} as const;
-
-export const doesNotApply = (kind: LimitKind, because: Words, source = ''): LimitVerdict => ({
-  ...blank,
+/** Written out field by field: a study makes a thousand of these, and spreading them costs more than solving them. */
+const verdictWith = ({ kind, verdict, because }: Answer, details: Details): LimitVerdict => ({
   kind,
-  verdict: 'does-not-apply',
+  verdict,
   because,
-  source,
+  value: details.value ?? null,
+  limit: details.limit ?? null,
+  margin: details.margin ?? null,
+  unit: details.unit ?? null,
+  state: details.state ?? null,
+  dewPoint: details.dewPoint ?? null,
+  sweatsFrom: details.sweatsFrom ?? null,
+  judgedAt: details.judgedAt ?? null,
+  source: details.source ?? '',
 });
 
-export const cannotTell = (kind: LimitKind, because: Words, details: Details = {}): LimitVerdict => ({
-  ...blank,
-  ...details,
-  kind,
-  verdict: 'cannot-tell',
-  because,
-});
+export const doesNotApply = (kind: LimitKind, because: Words, source = ''): LimitVerdict =>
+  verdictWith({ kind, verdict: 'does-not-apply', because }, { source });
+
+export const cannotTell = (kind: LimitKind, because: Words, details: Details = {}): LimitVerdict =>
+  verdictWith({ kind, verdict: 'cannot-tell', because }, details);
 
 export type Judged = Details & { isMet: boolean; because: Words };
 
-export const judged = (kind: LimitKind, { isMet, because, ...details }: Judged): LimitVerdict => ({
-  ...blank,
-  ...details,
-  kind,
-  verdict: isMet ? 'met' : 'not-met',
-  because,
-});
+export const judged = (kind: LimitKind, details: Judged): LimitVerdict =>
+  verdictWith({ kind, verdict: details.isMet ? 'met' : 'not-met', because: details.because }, details);
 
 const severity = { 'not-met': 3, 'cannot-tell': 2, met: 1, 'does-not-apply': 0 } as const;
 
