@@ -32,13 +32,15 @@ export function createContactService({ withFirm }: { withFirm: WithFirm }) {
         return must(await behind.contacts.update(seen, input));
       });
     },
-    /** @throws AppError `conflict` when a job names the contact */
+    /** @throws AppError `conflict` when a job names the contact, or something was sent to it */
     remove(member: Member, seen: RowSeen): Promise<void> {
       allow(member, 'edit-jobs');
       return withFirm(member.firmId, async (behind) => {
         await current(behind, seen);
         const jobs = await behind.contacts.jobsNaming(seen.id);
         if (jobs.length > 0) throw new AppError('conflict', inUse(jobs));
+        const messages = await behind.contacts.messagesTo(seen.id);
+        if (messages > 0) throw new AppError('conflict', 'Something was sent to this contact: it stays on the record');
         await behind.contacts.remove(seen);
       });
     },

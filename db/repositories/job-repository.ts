@@ -28,7 +28,7 @@ type JobRow = {
   specification_date: string | null;
   contact_ids: string[];
 };
-type SummaryRow = JobRow & { runs: number; on_hold: number };
+type SummaryRow = JobRow & { runs: number; on_hold: number; last_revision: string | null };
 
 export function createJobRepository(transaction: Knex.Transaction, firmId: string) {
   const jobs = () => transaction('jobs').where({ 'jobs.firm_id': firmId });
@@ -56,10 +56,18 @@ export function createJobRepository(transaction: Knex.Transaction, firmId: strin
         .groupBy('job_id')
         .select('job_id', transaction.raw("count(*) as runs, count(*) filter (where status = 'on-hold') as on_hold"))
         .as('counted');
+      const last = transaction('revisions')
+        .where({ firm_id: firmId })
+        .distinctOn('job_id')
+        .orderBy([{ column: 'job_id' }, { column: 'ordinal', order: 'desc' }])
+        .select('job_id', 'letter as last_revision')
+        .as('last');
       const rows: SummaryRow[] = await jobs()
         .leftJoin(counted, 'counted.job_id', 'jobs.id')
+        .leftJoin(last, 'last.job_id', 'jobs.id')
         .orderByRaw('jobs.bid_due_date desc nulls last, jobs.bid_due_time desc, jobs.entered desc')
-        .select('jobs.*', transaction.raw('coalesce(runs, 0) as runs, coalesce(on_hold, 0) as on_hold'));
+        .select('jobs.*', 'last_revision')
+        .select(transaction.raw('coalesce(runs, 0) as runs, coalesce(on_hold, 0) as on_hold'));
       return rows.map(toSummary);
     },
     async exists(id: string): Promise<boolean> {
@@ -158,5 +166,5 @@ const toSummary = (row: SummaryRow): JobSummary => ({
   bidDue: toMoment(row),
   runs: row.runs,
   onHold: row.on_hold,
-  lastRevision: null,
+  lastRevision: row.last_revision,
 });
