@@ -28,9 +28,12 @@ export async function newWorld(agent: Agent): Promise<World> {
   const contact = await agent.post('/api/contacts').send(contactInput).expect(201);
   const buildUp = buildUpInput(service.id);
   const specification = specificationInput(service.id);
+  const run = { ...runInput(where), id: crypto.randomUUID(), version: null };
+  await agent.patch(`${path}/runs`).send({ put: [run], drop: [] }).expect(200);
   const ids = {
     'jobs/:job': job.id,
     'contacts/:contact': String(contact.body.id),
+    'runs/:run': run.id,
     'levels/:id': level.id,
     'drawings/:id': drawing.id,
     'places/:id': place.id,
@@ -52,7 +55,6 @@ export async function newWorld(agent: Agent): Promise<World> {
     [`POST /jobs/:job/${name}`, input],
     [`PATCH /jobs/:job/${name}/:id`, { ...input, version: 1 }],
   ]);
-  const run = { ...runInput(where), id: crypto.randomUUID(), version: null };
   return {
     ids,
     bodies: {
