@@ -20,6 +20,8 @@ export type ButtonProps = {
   busyLabel?: string;
   disabled?: boolean;
   submit?: boolean;
+  /** the id of the form that it submits, when it stands outside of it */
+  formId?: string;
   /** as wide as its place: a phone's one action */
   full?: boolean;
   /** for gloves: 56 high */
@@ -28,13 +30,14 @@ export type ButtonProps = {
   name?: string;
 };
 
-export function Button({ label, onPress, tone = 'quiet', submit, name, ...props }: ButtonProps) {
+export function Button({ label, onPress, tone = 'quiet', submit, formId, name, ...props }: ButtonProps) {
   const theme = useTheme();
   const { busy, busyLabel, disabled, full, large } = props;
   return (
     <Element
       tag="button"
       type={submit ? 'submit' : 'button'}
+      form={formId}
       aria-label={name}
       aria-busy={busy}
       aria-disabled={busy || undefined}

@@ -5,10 +5,8 @@ import { hairline, space } from '@/components/theme/tokens';
 import { useTheme } from '@/components/theme/use-theme';
 
 import { Heading } from './heading';
-import { Link, LinkArea } from './link';
-import { Text } from './text';
-
-export type ListItem = { key: string; title: string; text?: string; aside?: string; href: Href };
+import { Link } from './link';
+import { ListRows, type ListItem } from './list-row';
 
 type ListPaneProps = {
   title: string;
@@ -27,59 +25,19 @@ export function ListPane({ title, href, items, chosen, add }: ListPaneProps) {
       <View style={styles.head}>
         <Heading>{title}</Heading>
         <View style={styles.links}>
-          <Link href={href} label="Show as a table" size="small" />
-          {add ? <Link href={add.href} label={add.label} size="small" /> : null}
+          <Link href={href} label="All in one table" />
+          {add ? <Link href={add.href} label={add.label} /> : null}
         </View>
       </View>
-      <View role="list" style={[styles.list, { borderTopColor: theme.rule }]}>
-        {items.map(({ key, ...item }) => (
-          <View key={key} role="listitem">
-            <Item {...item} isChosen={key === chosen} />
-          </View>
-        ))}
+      <View style={[styles.list, { borderTopColor: theme.rule }]}>
+        <ListRows label={title} items={items} chosen={chosen} />
       </View>
     </View>
   );
 }
 
-function Item({ title, text, aside, href, isChosen }: Omit<ListItem, 'key'> & { isChosen: boolean }) {
-  const theme = useTheme();
-  const colours = { borderBottomColor: theme.rule, borderLeftColor: isChosen ? theme.oxide : 'transparent' };
-  return (
-    <LinkArea href={href} current={isChosen}>
-      <View style={[styles.item, colours, isChosen && { backgroundColor: theme.sheet }]}>
-        <View style={styles.words}>
-          <Text weight="strong">{title}</Text>
-          {text ? (
-            <Text size="small" tone="inkSoft">
-              {text}
-            </Text>
-          ) : null}
-        </View>
-        {aside ? (
-          <Text weight="strong" numeric noWrap>
-            {aside}
-          </Text>
-        ) : null}
-      </View>
-    </LinkArea>
-  );
-}
-
 const styles = StyleSheet.create({
-  head: { paddingHorizontal: space.md, paddingTop: space.lg, paddingBottom: space.xs },
-  links: { flexDirection: 'row', gap: space.md, flexWrap: 'wrap' },
+  head: { paddingHorizontal: space.md, paddingTop: space.lg },
+  links: { flexDirection: 'row', columnGap: space.md, flexWrap: 'wrap' },
   list: { borderTopWidth: hairline },
-  item: {
-    flexDirection: 'row',
-    alignItems: 'center',
-    gap: space.sm,
-    minHeight: 60,
-    paddingVertical: space.xs,
-    paddingRight: space.md,
-    paddingLeft: space.md - 3,
-    borderLeftWidth: 3,
-    borderBottomWidth: hairline,
-  },
-  words: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
 });

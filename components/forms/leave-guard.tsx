@@ -1,0 +1,69 @@
+import { useEffect, useState } from 'react';
+
+import { ConfirmDialog } from '@/components/ui/confirm-dialog';
+
+import { useUnsaved } from './unsaved';
+
+/** Asks before a link or the back button throws away what is not saved. */
+export function LeaveGuard({ isUnsaved }: { isUnsaved: boolean }) {
+  const [leave, setLeave] = useState<() => void>();
+  const asks = isUnsaved && leave === undefined;
+  useUnsaved(isUnsaved);
+  useEffect(() => (asks ? holdLeaving((go) => setLeave(() => go)) : undefined), [asks]);
+  if (!leave) return null;
+  return (
+    <DiscardDialog
+      onKeep={() => setLeave(undefined)}
+      onDiscard={() => {
+        leave();
+        setLeave(undefined);
+      }}
+    />
+  );
+}
+
+export function DiscardDialog({ onKeep, onDiscard }: { onKeep: () => void; onDiscard: () => void }) {
+  return (
+    <ConfirmDialog
+      title="Leave without saving?"
+      confirm="Leave without saving"
+      cancel="Stay"
+      onConfirm={onDiscard}
+      onCancel={onKeep}
+    >
+      What you changed here is not saved yet, and would be lost.
+    </ConfirmDialog>
+  );
+}
+
+/** Stops a link and the browser's back and forward; `ask` gets what would have happened. */
+function holdLeaving(ask: (go: () => void) => void): () => void {
+  const stopClick = (event: MouseEvent) => {
+    const link = event.target instanceof Element ? event.target.closest<HTMLAnchorElement>('a[href]') : null;
+    if (!link || !opensHere(link, event)) return;
+    event.preventDefault();
+    event.stopPropagation();
+    ask(() => link.click());
+  };
+  const stopBack = (event: NavigateEvent) => {
+    if (event.navigationType !== 'traverse' || !event.cancelable) return;
+    event.preventDefault();
+    const { key } = event.destination;
+    ask(() => window.navigation.traverseTo(key));
+  };
+  // before React sees the click; not every browser has `navigation`, nor does a test's
+  const history = 'navigation' in window ? window.navigation : undefined;
+  document.addEventListener('click', stopClick, true);
+  history?.addEventListener('navigate', stopBack);
+  return () => {
+    document.removeEventListener('click', stopClick, true);
+    history?.removeEventListener('navigate', stopBack);
+  };
+}
+
+function opensHere(link: HTMLAnchorElement, event: MouseEvent): boolean {
+  const elsewhere = link.target !== '' && link.target !== '_self';
+  const modified = [event.metaKey, event.ctrlKey, event.shiftKey, event.altKey].includes(true) || event.button !== 0;
+  const inPage = link.getAttribute('href')?.startsWith('#') ?? false;
+  return !elsewhere && !modified && !inPage && !link.hasAttribute('download');
+}

@@ -1,0 +1,82 @@
+import type { Href } from 'expo-router';
+import { StyleSheet, View } from 'react-native';
+
+import { hairline, space } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/use-theme';
+
+import { LinkArea } from './link';
+import { Text } from './text';
+
+export type ListItem = { key: string; title: string; text?: string; aside?: string; href: Href };
+
+type ListRowsProps = {
+  /** what the list lists */
+  label: string;
+  items: readonly ListItem[];
+  chosen?: string;
+  /** flush with what stands above: no room at the sides */
+  flush?: boolean;
+};
+
+/** Things that can be gone to: a name, a line about it, and the one fact by which it is known. */
+export function ListRows({ label, items, chosen, flush = false }: ListRowsProps) {
+  return (
+    <View role="list" aria-label={label}>
+      {items.map(({ key, ...item }) => (
+        <View key={key} role="listitem">
+          <ListRow {...item} isChosen={key === chosen} flush={flush} />
+        </View>
+      ))}
+    </View>
+  );
+}
+
+function ListRow({
+  title,
+  text,
+  aside,
+  href,
+  isChosen,
+  flush,
+}: Omit<ListItem, 'key'> & { isChosen: boolean; flush: boolean }) {
+  const theme = useTheme();
+  const colours = { borderBottomColor: theme.rule, borderLeftColor: isChosen ? theme.oxide : 'transparent' };
+  return (
+    <LinkArea href={href} current={isChosen}>
+      <View style={[styles.row, flush ? styles.flush : colours, isChosen && { backgroundColor: theme.sheet }]}>
+        <View style={styles.words}>
+          <Text weight="strong">{title}</Text>
+          {text ? (
+            <Text size="small" tone="inkSoft">
+              {text}
+            </Text>
+          ) : null}
+        </View>
+        {aside ? (
+          <View style={styles.aside}>
+            <Text numeric align="right">
+              {aside}
+            </Text>
+          </View>
+        ) : null}
+      </View>
+    </LinkArea>
+  );
+}
+
+const styles = StyleSheet.create({
+  row: {
+    flexDirection: 'row',
+    alignItems: 'center',
+    gap: space.sm,
+    minHeight: 52,
+    paddingVertical: space.xs,
+    paddingRight: space.md,
+    paddingLeft: space.md - 3,
+    borderLeftWidth: 3,
+    borderBottomWidth: hairline,
+  },
+  flush: { paddingLeft: 0, paddingRight: space.xs, borderLeftWidth: 0, borderBottomWidth: 0 },
+  words: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
+  aside: { flexShrink: 0, maxWidth: '40%' },
+});
