@@ -81,16 +81,16 @@ export function materialsText(layers: readonly Layer[], materials: readonly Name
 /** All that a row says, as a person reads it. */
 export function coveringFacts(row: BuildUpInput, names: CoveringNames) {
   return [
-    { label: 'Service', text: nameIn(names.services, row.serviceId) },
-    { label: 'Applies to', text: bodyWords[row.appliesTo] },
-    { label: 'Places', text: placesText(row.placeIds, names.places) },
-    { label: 'Sizes', text: bandText(row, names) },
+    { term: 'Service', value: nameIn(names.services, row.serviceId) },
+    { term: 'Applies to', value: bodyWords[row.appliesTo] },
+    { term: 'Places', value: placesText(row.placeIds, names.places) },
+    { term: 'Sizes', value: bandText(row, names) },
     ...row.layers.map((layer, index) => ({
-      label: row.layers.length > 1 ? `Layer ${index + 1}` : 'Layer',
-      text: `${layerText(layer, names)}${layer.thickness === null ? ', thickness left to the study' : ''}`,
+      term: row.layers.length > 1 ? `Layer ${index + 1}` : 'Layer',
+      value: `${layerText(layer, names)}${layer.thickness === null ? ', thickness left to the study' : ''}`,
     })),
-    { label: 'Finish', text: nameIn(names.finishes, row.finishId) },
-    { label: 'Vapour retarder', text: retarderWords[row.vapourRetarder] },
-    { label: 'Note', text: row.note },
+    { term: 'Finish', value: nameIn(names.finishes, row.finishId) },
+    { term: 'Vapour retarder', value: retarderWords[row.vapourRetarder] },
+    { term: 'Note', value: row.note },
   ];
 }

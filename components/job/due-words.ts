@@ -47,6 +47,12 @@ export function dueShort({ date, time }: Moment): string {
   return `${words.format(new Date(`${date}T12:00:00Z`)).replace(',', '')}, ${time}`;
 }
 
+/** "3 December 2026": a day in a document's date, which has no zone. */
+export const dateText = (date: string): string =>
+  new Intl.DateTimeFormat('en-GB', { timeZone: 'UTC', day: 'numeric', month: 'long', year: 'numeric' }).format(
+    new Date(`${date}T12:00:00Z`),
+  );
+
 export const zoneText = (zone: string): string => zone.split('/').at(-1)!.replaceAll('_', ' ');
 
 export type Countdown = { text: string; standing: 'past' | 'today' | 'ahead' };
