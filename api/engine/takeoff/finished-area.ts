@@ -1,67 +1,50 @@
 import { EngineError } from '../engine-error';
 
 /**
- * Finished surface of straight cylinder: π · D · L
+ * Finished surface of an insulated cylinder: A = π D L
  *
- * @param outsideDiameter - D, made outside diameter of the finished insulation [m]
- * @param length - L, net along the centre line [m]
- * @returns [m²], not rounded
- * @throws EngineError when a length is negative or no number
- * @source geometry; the outer surface of the finished insulation is the common rule of measurement
- */
-export const cylinderArea = (outsideDiameter: number, length: number): number =>
-  Math.PI * size(outsideDiameter, 'outsideDiameter') * size(length, 'length');
-
-/**
- * Finished surface of board on a rectangular duct: (P + 8t) · L, P = 2 (w + h); the four corners overlap.
- *
- * @param width - w of the metal [m]
- * @param height - h of the metal [m]
- * @param thickness - t as put up [m]
- * @param length - L, net [m]
- * @returns [m²], not rounded
- * @throws EngineError when a length is negative or no number
+ * @param outsideDiameter - made outside diameter of the insulation [m]
+ * @param length - measured length [m]
+ * @returns area [m²]
+ * @throws EngineError when a dimension is not a positive number
  * @source geometry
  */
-export function rectangularDuctArea(duct: {
-  width: number;
-  height: number;
-  thickness: number;
-  length: number;
-}): number {
-  const perimeter = 2 * (size(duct.width, 'width') + size(duct.height, 'height'));
-  return (perimeter + 8 * size(duct.thickness, 'thickness')) * size(duct.length, 'length');
+export function cylinderArea(outsideDiameter: number, length: number): number {
+  return Math.PI * positive(outsideDiameter, 'Outside diameter') * positive(length, 'Length');
 }
 
-/** How often an end's projected plan area counts. */
-const endFactor = { none: 0, flat: 1, domed: 2 } as const;
+/** Metal of a rectangular duct and what is put on it [m]. */
+export type InsulatedDuct = { width: number; height: number; thickness: number; length: number };
 
 /**
- * Finished surface of a vessel: shell π · D · L and two ends, flat ones by their plan area π D² / 4, domed ones by twice
- * that.
+ * Finished surface of an insulated rectangular duct: A = (P + 8 t) L, P = 2 (w + h) the perimeter of the metal
  *
- * @param outsideDiameter - D of the finished insulation [m]
- * @param length - L of the shell [m]
- * @returns [m²], not rounded
- * @throws EngineError when a length is negative or no number
- * @source IS 14164, mode of measurement, as restated publicly (domed ends as twice the projected plan area)
+ * @returns area [m²]; corners are square, as board lies
+ * @throws EngineError when a dimension is not a positive number
+ * @source geometry
  */
-export function vesselArea(vessel: { outsideDiameter: number; length: number; ends: keyof typeof endFactor }): number {
-  const end = (Math.PI * vessel.outsideDiameter ** 2) / 4;
-  return cylinderArea(vessel.outsideDiameter, vessel.length) + 2 * endFactor[vessel.ends] * end;
+export function rectangularDuctArea({ width, height, thickness, length }: InsulatedDuct): number {
+  const perimeter = 2 * (positive(width, 'Width') + positive(height, 'Height'));
+  return (perimeter + 8 * positive(thickness, 'Thickness')) * positive(length, 'Length');
 }
 
-/**
- * Finished surface of equal flat areas: measured area × count.
- *
- * @param area - of one [m²]
- * @returns [m²], not rounded
- * @throws EngineError when the area is negative or no number
- * @source as measured
- */
-export const flatArea = (area: number, count: number): number => size(area, 'area') * size(count, 'count');
+export type InsulatedVessel = { outsideDiameter: number; length: number; ends: 'none' | 'flat' | 'domed' };
 
-function size(value: number, field: string): number {
-  if (value >= 0 && value < Infinity) return value;
-  throw new EngineError(`${field} must be a length of at least 0, got ${value}`, field);
+/**
+ * Finished surface of an insulated vessel with its two ends: A = π D L + 2 Aₑ, where Aₑ = π D²/4 for a flat end and
+ * π D²/2 for a domed one, twice its projected plan area
+ *
+ * @returns area [m²]
+ * @throws EngineError when a dimension is not a positive number
+ * @source geometry; domed ends as IS 14164, mode of measurement, has them, as restated publicly
+ */
+export function vesselArea({ outsideDiameter, length, ends }: InsulatedVessel): number {
+  const disc = (Math.PI * outsideDiameter ** 2) / 4;
+  const endArea = { none: 0, flat: disc, domed: 2 * disc }[ends];
+  return cylinderArea(outsideDiameter, length) + 2 * endArea;
+}
+
+function positive(value: number, name: string): number {
+  if (value > 0 && value < Infinity) return value;
+  throw new EngineError(`${name} must be positive, got ${value}`);
 }
