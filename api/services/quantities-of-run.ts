@@ -3,12 +3,10 @@ import { fittingKinds, type Fittings, type Shape } from '@/api/contracts/run';
 import type { TakeoffLine } from '@/api/contracts/schedule';
 import type { Candidate } from '@/api/engine/limits/study-types';
 import { cylinderArea, rectangularDuctArea, vesselArea } from '@/api/engine/takeoff/finished-area';
-
-/** Net quantities of one run: measured length [m], finished area [m²], pieces; null where it has none. */
-export type RunQuantities = Pick<TakeoffLine, 'length' | 'area' | 'count'>;
+import type { NetQuantities } from '@/api/engine/takeoff/net-quantities';
 
 /** `used`: what is put up, for the made diameter; null leaves the finished area open. */
-export const quantitiesOf = (shape: Shape, used: Candidate | null): RunQuantities => ({
+export const quantitiesOf = (shape: Shape, used: Candidate | null): NetQuantities => ({
   length: lengthOf(shape),
   area: areaOf(shape, used),
   count: 'count' in shape ? shape.count : null,

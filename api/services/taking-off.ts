@@ -1,10 +1,11 @@
 import type { JobData } from '@/api/contracts/job-data';
 import type { Takeoff, TakeoffLine } from '@/api/contracts/schedule';
+import { sumOfNet } from '@/api/engine/takeoff/net-quantities';
 
 import { bodyKindOf } from './assembly';
 import type { Judged } from './judged';
 import { groupBy, inServiceOrder, insulationOf } from './insulated-alike';
-import { addFittings, quantitiesOf, type RunQuantities } from './quantities-of-run';
+import { addFittings, quantitiesOf } from './quantities-of-run';
 import { sizeWords } from './sizes';
 
 /**
@@ -37,17 +38,9 @@ function takeoffLine(data: JobData, key: string, group: readonly Judged[]): Take
     material,
     names,
     finish,
-    length: sum(quantities, 'length'),
-    area: sum(quantities, 'area'),
-    count: sum(quantities, 'count'),
+    ...sumOfNet(quantities),
     fittings: addFittings(group.map((judged) => judged.run.fittings)),
     runIds: group.map((judged) => judged.run.id),
     runNumbers: group.map((judged) => judged.run.number),
   };
-}
-
-/** Null where no run of the group has this quantity. */
-function sum(quantities: readonly RunQuantities[], of: keyof RunQuantities): number | null {
-  const known = quantities.flatMap((quantity) => quantity[of] ?? []);
-  return known.length > 0 ? known.reduce((total, value) => total + value, 0) : null;
 }
