@@ -3,6 +3,8 @@ import type { Words } from '@/api/engine/words';
 
 import { showWithUnit, type UnitSystem } from './quantities';
 
+export type { Words };
+
 /** A sentence of the engine in a reader's units. */
 export const wordsText = (words: Words, units: UnitSystem): string =>
   words.map((part) => partText(part, units)).join('');

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { extentOf, section, sectionToScale, type SectionInput } from '@/api/geometry/section';
 

@@ -1,0 +1,71 @@
+import { StyleSheet, View } from 'react-native';
+
+import type { StripLayout } from '@/api/geometry/strip';
+import { space } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/use-theme';
+import { webStyle } from '@/components/theme/web-style';
+import { Text } from '@/components/ui/text';
+
+/** Left of the strip on a wide screen: the scale of the plot, and what the quiet row is in. */
+export const gutter = 52;
+
+type StripAxisProps = { layout: StripLayout; unit: string; heatUnit: string };
+
+export function StripAxis({ layout, unit, heatUnit }: StripAxisProps) {
+  return (
+    <View aria-hidden style={styles.axis}>
+      <View style={[styles.tick, { top: 0 }]}>
+        <Text size="small" tone="inkSoft">
+          {unit}
+        </Text>
+      </View>
+      {layout.ticks
+        .filter(({ y }) => y > layout.top + 4)
+        .map(({ value, y }) => (
+          <View key={value} style={[styles.tick, { top: y - 9 }]}>
+            <Text size="small" tone="inkSoft" numeric>
+              {`${value}`.replace('-', '−')}
+            </Text>
+          </View>
+        ))}
+      <View style={[styles.tick, { top: layout.base + space.xs + 22 }]}>
+        <Text size="small" tone="inkSoft" align="right">
+          {heatUnit}
+        </Text>
+      </View>
+    </View>
+  );
+}
+
+export type NamedLevel = { id: string; text: string; y: number; side: 'left' | 'right' };
+
+/** Names of the levels, over whatever part of the strip is in view. */
+export function LevelNames({ levels }: { levels: readonly NamedLevel[] }) {
+  const theme = useTheme();
+  const lowest = Math.max(...levels.map(({ y }) => y));
+  return levels.map(({ id, text, y, side }) => {
+    // of two on one side the lower one is named below its line
+    const isBelow = y === lowest && levels.some((other) => other.side === side && other.y < y);
+    return (
+      <View
+        key={id}
+        aria-hidden
+        style={[styles.name, side === 'left' ? styles.left : styles.right, { top: isBelow ? y + 2 : y - 20 }]}
+      >
+        <View style={{ backgroundColor: theme.paper, opacity: 0.94 }}>
+          <Text size="small" tone="fail" weight="strong" noWrap>
+            {text}
+          </Text>
+        </View>
+      </View>
+    );
+  });
+}
+
+const styles = StyleSheet.create({
+  axis: webStyle({ position: 'absolute', left: 0, top: 0, width: gutter, pointerEvents: 'none' }),
+  tick: { position: 'absolute', right: space.xs },
+  name: webStyle({ position: 'absolute', pointerEvents: 'none', paddingLeft: space.xxs, paddingRight: space.xxs }),
+  left: { left: 0 },
+  right: { right: 0 },
+});

@@ -1,0 +1,127 @@
+import { useLayoutEffect, useRef, useState, type KeyboardEvent } from 'react';
+import { StyleSheet, View } from 'react-native';
+
+import { unitLabel } from '@/api/contracts/quantities';
+import type { RunStudy } from '@/api/contracts/study';
+import { strip, type StripLayout } from '@/api/geometry/strip';
+import { StripPlot } from '@/components/diagram/strip-plot';
+import { useLayout } from '@/components/theme/use-layout';
+import { webStyle } from '@/components/theme/web-style';
+import { Element } from '@/components/ui/element';
+import { useUnits } from '@/hooks/use-units';
+
+import { candidateName, heatKind, heatText } from './candidate-words';
+import { standingWords, type Standing } from './put-up';
+import { StripColumn } from './strip-column';
+import { columnText, levelText, stripFacts, type StripFacts } from './strip-facts';
+import { gutter, LevelNames, StripAxis } from './strip-frame';
+import { placeAfter } from './strip-keys';
+
+type ThicknessStripProps = {
+  runStudy: RunStudy;
+  standing: Standing;
+  selected: number;
+  onSelect: (place: number) => void;
+};
+
+const rooms = {
+  phone: { least: 128, plot: 132, tallest: 112 },
+  wide: { least: 62, plot: 200, tallest: 84 },
+};
+
+/** Every thickness that is made, growing from left to right on one base line; one of them is selected. */
+export function ThicknessStrip({ runStudy, standing, selected, onSelect }: ThicknessStripProps) {
+  const { isPhone } = useLayout();
+  const { units } = useUnits();
+  const left = isPhone ? 0 : gutter;
+  const [width, setWidth] = useState(isPhone ? 358 : 800);
+  const facts = stripFacts(runStudy, units);
+  const layout = strip(facts.input, { width: width - left, ...rooms[isPhone ? 'phone' : 'wide'] });
+  const heatUnit = unitLabel(heatKind(runStudy.study.candidates[0]), units);
+  return (
+    <View style={styles.whole} onLayout={({ nativeEvent }) => setWidth(nativeEvent.layout.width)}>
+      {isPhone ? null : <StripAxis layout={layout} unit={unitLabel('temperature', units)} heatUnit={heatUnit} />}
+      <View style={{ marginLeft: left }}>
+        <Columns {...{ runStudy, standing, selected, onSelect, layout, facts }} />
+        <LevelNames levels={namedLevels(facts, { layout, units, isPhone })} />
+      </View>
+    </View>
+  );
+}
+
+type ColumnsProps = ThicknessStripProps & { layout: StripLayout; facts: StripFacts };
+
+function Columns({ runStudy, standing, selected, onSelect, layout, facts }: ColumnsProps) {
+  const { isPhone } = useLayout();
+  const { units } = useUnits();
+  const scroll = useRef<HTMLDivElement>(null);
+  const { candidates } = runStudy.study;
+  useLayoutEffect(() => reveal(scroll.current, (selected + 0.5) * layout.pitch), [selected, layout.pitch]);
+  const walk = (event: KeyboardEvent) => {
+    const place = placeAfter(event.key, { at: selected, count: candidates.length });
+    if (place === null) return;
+    event.preventDefault();
+    onSelect(place);
+    scroll.current?.querySelectorAll<HTMLElement>('[role="radio"]')[place]?.focus({ preventScroll: true });
+  };
+  const inks = Object.fromEntries(facts.curves.map(({ id, ink }) => [id, ink]));
+  const digits = units === 'SI' || facts.levels.some(({ kind }) => kind === 'dew-point') ? 1 : 0;
+  return (
+    <Element tag="div" ref={scroll} style={styles.scroll}>
+      <View style={{ width: layout.width }}>
+        <View style={styles.plot}>
+          <StripPlot
+            layout={layout}
+            inks={inks}
+            selected={selected}
+            text={(value) => value.toFixed(digits).replace('-', '−')}
+          />
+        </View>
+        <View role="radiogroup" aria-label="Thickness" style={styles.row}>
+          {candidates.map((candidate, place) => (
+            <StripColumn
+              key={candidate.names.join() || 'bare'}
+              placed={layout.columns[place]!}
+              base={layout.base}
+              pitch={layout.pitch}
+              candidate={candidate}
+              name={candidateName(candidate, units)}
+              heat={isPhone ? heatText(candidate, units) : heatNumber(heatText(candidate, units))}
+              words={standingWords(standing, place)}
+              said={columnText(place, { runStudy, standing, units })}
+              selected={place === selected}
+              onSelect={() => onSelect(place)}
+              onKeyDown={walk}
+            />
+          ))}
+        </View>
+      </View>
+    </Element>
+  );
+}
+
+/** The unit stands once, at the left. */
+const heatNumber = (text: string) => text.replace(/ .*/, '');
+
+/** Brings a place of the strip to the middle of what is in view; what fits as a whole does not move. */
+function reveal(scroll: HTMLDivElement | null, x: number): void {
+  if (scroll) scroll.scrollLeft = x - scroll.clientWidth / 2;
+}
+
+type Named = { layout: StripLayout; units: Parameters<typeof levelText>[1]; isPhone: boolean };
+
+/** A touch limit is named where the curve has left it behind, a dew point where it has not come up to it. */
+const namedLevels = ({ levels }: StripFacts, { layout, units, isPhone }: Named) =>
+  levels.map((level) => ({
+    id: level.id,
+    text: levelText(level, units),
+    y: layout.levels.find(({ id }) => id === level.id)?.y ?? 0,
+    side: isPhone || level.kind === 'dew-point' ? ('left' as const) : ('right' as const),
+  }));
+
+const styles = StyleSheet.create({
+  whole: { minWidth: 0 },
+  scroll: webStyle({ overflowX: 'auto', overflowY: 'hidden', scrollSnapType: 'x proximity', paddingBottom: 4 }),
+  plot: webStyle({ position: 'absolute', left: 0, top: 0, pointerEvents: 'none' }),
+  row: { flexDirection: 'row', alignItems: 'stretch' },
+});

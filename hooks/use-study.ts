@@ -1,0 +1,32 @@
+import useSWR from 'swr';
+
+import { runStudySchema, workingSchema, type RunStudy, type Working } from '@/api/contracts/study';
+import { request, type RequestFailed } from '@/hooks/request';
+
+const studyPath = (jobId: string, runId: string) => `/jobs/${jobId}/runs/${runId}`;
+
+/** A run's study; worked out again by the server at each request, so it is read again after every change of the job. */
+export function useStudy(jobId: string, runId: string) {
+  const { data, error, mutate, isValidating } = useSWR<RunStudy, RequestFailed>(
+    `${studyPath(jobId, runId)}/study`,
+    (path: string) => request(path, runStudySchema),
+  );
+  // an answer that came before the run could no longer be calculated is not its study any more
+  return {
+    study: error ? undefined : data,
+    problem: error?.problem,
+    isRefreshing: isValidating,
+    reload: () => mutate(),
+  };
+}
+
+export type WorkingAsked = { candidate: number; about: string };
+
+/** The working of one number; nothing is asked for as long as nothing is opened. */
+export function useWorking({ jobId, runId }: { jobId: string; runId: string }, asked: WorkingAsked | undefined) {
+  const key = asked && `${studyPath(jobId, runId)}/working?candidate=${asked.candidate}&about=${asked.about}`;
+  const { data, error, mutate } = useSWR<Working, RequestFailed>(key ?? null, (path: string) =>
+    request(path, workingSchema),
+  );
+  return { working: data, problem: error?.problem, reload: () => void mutate() };
+}
