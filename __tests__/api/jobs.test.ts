@@ -95,3 +95,26 @@ describe('jobs', () => {
     expect(answers.map(({ status }) => status).sort()).toEqual([201, 400, 400]);
   });
 });
+
+describe('what was frozen and sent', () => {
+  it('shows the last revision in the list, and keeps a contact that something was sent to', async () => {
+    const { job } = await newJob(agent, { number: 'REV-1' });
+    const contact = (await agent.post('/api/contacts').send(contactInput).expect(201)).body;
+    const { firm_id } = await stack.owner('jobs').where({ id: job.id }).first();
+    const now = new Date();
+    const frozen = { firm_id, job_id: job.id, frozen_at: now, frozen_by: 'Olive Owner', expires_at: now };
+    const revision = { ...frozen, valid_until: '2027-01-15', snapshot: '{}', runs: 0, flags: 0 };
+    const [first] = await stack
+      .owner('revisions')
+      .insert(['A', 'B'].map((letter, index) => ({ ...revision, letter, ordinal: index + 1 })))
+      .returning('id');
+    const people = { to_name: 'C', to_email: 'c@x.example', sender_name: 'O', sender_email: 'o@x.example' };
+    const message = { firm_id, revision_id: first.id, contact_id: contact.id, subject: 'S', words: '', asked_at: now };
+    await stack.owner('messages').insert({ ...message, ...people });
+
+    const { body: jobs } = await agent.get('/api/jobs').expect(200);
+    expect(jobs).toContainEqual(expect.objectContaining({ number: 'REV-1', lastRevision: 'B' }));
+    const { body } = await agent.delete(`/api/contacts/${contact.id}?version=1`).expect(409);
+    expect(body.detail).toBe('Something was sent to this contact: it stays on the record');
+  });
+});
