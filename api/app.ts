@@ -7,6 +7,8 @@ import { contactRoutes } from '@/api/routes/contact-routes';
 import { healthRoutes, type Readiness } from '@/api/routes/health-routes';
 import { jobRoutes } from '@/api/routes/job-routes';
 import { libraryRoutes } from '@/api/routes/library-routes';
+import { linkRoutes } from '@/api/routes/link-routes';
+import { messageRoutes } from '@/api/routes/message-routes';
 import { securityHeaders } from '@/api/routes/middleware/headers';
 import type { Limit } from '@/api/routes/middleware/limit';
 import { withMember } from '@/api/routes/middleware/member';
@@ -14,6 +16,7 @@ import { problemHandler } from '@/api/routes/middleware/problem-handler';
 import { sameSite } from '@/api/routes/middleware/same-site';
 import { webApp } from '@/api/routes/middleware/web-app';
 import { placeRoutes } from '@/api/routes/place-routes';
+import { revisionRoutes } from '@/api/routes/revision-routes';
 import { runRoutes } from '@/api/routes/run-routes';
 import { serviceRoutes } from '@/api/routes/service-routes';
 import { sessionRoutes } from '@/api/routes/session-routes';
@@ -56,7 +59,8 @@ function routes(services: Services, signInLimit: Limit): Router {
   router.use(jobRoutes(services.job), contactRoutes(services.contact), basisRoutes(services.basis));
   router.use(placeRoutes(services.place), serviceRoutes(services.service), buildUpRoutes(services.buildUp));
   router.use(specificationRoutes(services.specification), runRoutes(services.run), libraryRoutes(services.library));
-  router.use(studyRoutes(services.study));
+  router.use(studyRoutes(services.study), revisionRoutes(services.revision));
+  router.use(messageRoutes(services.message), linkRoutes(services.link));
   return router;
 }
 

@@ -4,8 +4,10 @@ import type PgBoss from 'pg-boss';
 import type { QueueJob, QueueName } from '@/db/queues';
 import { createRepositories, type Repositories } from '@/db/repositories/repositories';
 
+/** `after`: seconds until a worker may take the job. */
+type When = { after?: number };
 /** Puts a job in a queue on the transaction's own connection: a rollback drops it, a commit keeps it. */
-export type Enqueue = <Name extends QueueName>(name: Name, job: QueueJob<Name>) => Promise<void>;
+export type Enqueue = <Name extends QueueName>(name: Name, job: QueueJob<Name>, when?: When) => Promise<void>;
 export type Behind = Repositories & { enqueue: Enqueue };
 export type WithFirm = <Result>(firmId: string, work: (behind: Behind) => Promise<Result>) => Promise<Result>;
 
@@ -20,8 +22,8 @@ export function createWithFirm({ db, boss }: { db: Knex; boss: PgBoss }): WithFi
 
 function enqueueOn(boss: PgBoss, transaction: Knex.Transaction): Enqueue {
   const executeSql = (text: string, values: unknown[]) => query(transaction, text, values);
-  return async (name, job) => {
-    const id = await boss.send(name, job, { db: { executeSql } });
+  return async (name, job, { after = 0 } = {}) => {
+    const id = await boss.send(name, job, { db: { executeSql }, startAfter: after });
     if (!id) throw new Error(`The queue ${name} took no job`);
   };
 }

@@ -7,6 +7,8 @@ export const sendInputSchema = z.object({
   contactIds: z.array(idSchema).min(1, 'Choose at least one recipient').max(20, 'At most 20 recipients'),
   subject: line(200),
   words: paragraph(4000),
+  /** true: a contact who has this revision already gets it once more, deliberately */
+  again: z.boolean().optional(),
 });
 export type SendInput = z.infer<typeof sendInputSchema>;
 

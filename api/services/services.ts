@@ -7,8 +7,13 @@ import { createBuildUpService } from './build-up-service';
 import { createContactService } from './contact-service';
 import { createJobService } from './job-service';
 import { createLibraryService } from './library-service';
+import { createLinkService } from './link-service';
 import { createMemberService } from './member-service';
+import { createMessageService } from './message-service';
 import { createPlaceService } from './place-service';
+import { createRenderingService } from './rendering-service';
+import { createRevisionSending } from './revision-sending';
+import { createRevisionService } from './revision-service';
 import { createRunService } from './run-service';
 import { createServiceService } from './service-service';
 import { createSessionService } from './session-service';
@@ -21,7 +26,7 @@ export type ServiceParts = { withFirm: WithFirm; doors: Doors; clock: Clock; set
 
 /** Every service, built once and alike for server, worker, seed and tests. */
 export function createServices({ withFirm, doors, clock, settings }: ServiceParts) {
-  const { bcryptCost } = settings;
+  const { bcryptCost, publicUrl } = settings;
   return {
     session: createSessionService({ withFirm, doors, clock, bcryptCost }),
     member: createMemberService({ withFirm, doors, bcryptCost }),
@@ -35,6 +40,13 @@ export function createServices({ withFirm, doors, clock, settings }: ServicePart
     run: createRunService({ withFirm }),
     study: createStudyService({ withFirm }),
     library: createLibraryService(),
+    revision: {
+      ...createRevisionService({ withFirm, clock }),
+      ...createRevisionSending({ withFirm, clock, publicUrl }),
+    },
+    rendering: createRenderingService({ withFirm }),
+    message: createMessageService({ withFirm, clock }),
+    link: createLinkService({ doors: doors.link, clock }),
   };
 }
 export type Services = ReturnType<typeof createServices>;

@@ -3,6 +3,8 @@ import { z } from 'zod';
 
 import type { FirmInput } from '@/api/contracts/session';
 
+import { createLinkDoors } from './link-doors';
+
 const signInRow = z.object({ account_id: z.uuid(), firm_id: z.uuid(), password_hash: z.string() });
 const foundedRow = z.object({ account_id: z.uuid(), firm_id: z.uuid() });
 const waitRow = z.object({ wait: z.number() });
@@ -15,6 +17,7 @@ export function createDoors(db: Knex) {
   const ask = async (sql: string, values: readonly Knex.RawBinding[]) =>
     (await db.raw<{ rows: unknown[] }>(sql, values)).rows[0];
   return {
+    link: createLinkDoors(db),
     async signIn(email: string) {
       const row = await ask('select * from door_sign_in(?)', [email]);
       return row === undefined ? undefined : signInRow.parse(row);

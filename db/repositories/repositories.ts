@@ -8,8 +8,12 @@ import { createFirmRepository } from './firm-repository';
 import { createJobDataRepository } from './job-data';
 import { createJobRepository } from './job-repository';
 import { createLevelRepository } from './level-repository';
+import { createLinkRepository } from './link-repository';
 import { createMemberRepository } from './member-repository';
+import { createMessageRepository } from './message-repository';
+import { createOutgoingRepository } from './outgoing-repository';
 import { createPlaceRepository } from './place-repository';
+import { createRevisionRepository } from './revision-repository';
 import { createRunRepository } from './run-repository';
 import { createServiceRepository } from './service-repository';
 import { createSpecificationRepository } from './specification-repository';
@@ -33,6 +37,10 @@ export function createRepositories(transaction: Knex.Transaction, firmId: string
     members: createMemberRepository(transaction, firmId),
     ...job,
     jobData: createJobDataRepository(job),
+    revisions: createRevisionRepository(transaction, firmId),
+    messages: createMessageRepository(transaction, firmId),
+    outgoing: createOutgoingRepository(transaction, firmId),
+    links: createLinkRepository(transaction, firmId),
   };
 }
 export type Repositories = ReturnType<typeof createRepositories>;
