@@ -1,7 +1,7 @@
 import useSWR, { useSWRConfig } from 'swr';
 import { z } from 'zod';
 
-import { runSchema, runsPatchedSchema, type Run, type RunsPatch } from '@/api/contracts/run';
+import { runSchema, runsPatchedSchema, type Run, type RunInput, type RunsPatch } from '@/api/contracts/run';
 import { request, type RequestFailed } from '@/hooks/request';
 
 const runsSchema = z.object({ runs: runSchema.array() });
@@ -22,5 +22,22 @@ export function usePatchRuns(jobId: string) {
     const { put } = await request(path, runsPatchedSchema, { method: 'PATCH', body: patch });
     await mutate((key) => typeof key === 'string' && key.startsWith(`/jobs/${jobId}`));
     return put;
+  };
+}
+
+type Seen = Pick<Run, 'id' | 'version'>;
+
+/** One run at a time; the id of a new one is made here, so that a retry of the same save writes it once. */
+export function useRunActions(jobId: string) {
+  const patch = usePatchRuns(jobId);
+  const only = async (sent: Promise<Run[]>): Promise<Run> => {
+    const [run] = await sent;
+    if (!run) throw new Error('The server answered without the run');
+    return run;
+  };
+  return {
+    create: (input: RunInput, id: string) => only(patch({ put: [{ ...input, id, version: null }], drop: [] })),
+    change: ({ id, version }: Seen, input: RunInput) => only(patch({ put: [{ ...input, id, version }], drop: [] })),
+    remove: ({ id, version }: Seen) => patch({ put: [], drop: [{ id, version }] }),
   };
 }

@@ -98,6 +98,8 @@ export const runInputSchema = z
     error: 'A run on hold names the reason and who placed it',
   });
 export type RunInput = z.infer<typeof runInputSchema>;
+/** As a form holds it, before it is checked. */
+export type RunDraft = z.input<typeof runInputSchema>;
 
 export const runSchema = rowSchema.extend(runInputSchema.shape);
 export type Run = z.infer<typeof runSchema>;

@@ -1,0 +1,93 @@
+import { useState } from 'react';
+
+import type { Run } from '@/api/contracts/run';
+import { Button } from '@/components/ui/button';
+import { ConfirmDialog } from '@/components/ui/confirm-dialog';
+import { LinkButton } from '@/components/ui/link';
+import { useToast } from '@/components/ui/toast';
+import { useRunActions } from '@/hooks/use-runs';
+
+import { newRun, nextNumber } from './run-defaults';
+import { RunForm } from './run-form';
+import type { RunLookups, RunRow } from './run-row';
+
+type RunEditorProps = {
+  jobId: string;
+  /** undefined: a new run */
+  row: RunRow | undefined;
+  rows: readonly RunRow[];
+  lookups: RunLookups;
+  onClose: () => void;
+  onSaved: (run: Run) => void;
+};
+
+/** The form of one run with what else can be done with it: its study, another like it, removing it. */
+export function RunEditor({ jobId, row, rows, lookups, onClose, onSaved }: RunEditorProps) {
+  const toast = useToast();
+  const [copied, setCopied] = useState<Run>();
+  const numbers = rows.map(({ run }) => run.number);
+  const last = rows.at(-1)?.run;
+  const run = copied ? null : (row?.run ?? null);
+  const initial = copied
+    ? { ...copied, number: nextNumber(numbers), override: copied.override }
+    : (run ?? newRun(last, nextNumber(numbers)));
+  const saved = (stored: Run) => {
+    toast({ text: `${stored.number} is saved.` });
+    setCopied(undefined);
+    onSaved(stored);
+  };
+  return (
+    <RunForm
+      key={copied ? `copy of ${copied.id}` : (run?.id ?? 'new')}
+      jobId={jobId}
+      run={run}
+      initial={initial}
+      lookups={lookups}
+      onSaved={saved}
+      onCancel={onClose}
+      actions={run ? <RunActions jobId={jobId} run={run} onCopy={() => setCopied(run)} onRemoved={onClose} /> : null}
+    />
+  );
+}
+
+type RunActionsProps = { jobId: string; run: Run; onCopy: () => void; onRemoved: () => void };
+
+function RunActions({ jobId, run, onCopy, onRemoved }: RunActionsProps) {
+  const [asks, setAsks] = useState(false);
+  const [busy, setBusy] = useState(false);
+  const toast = useToast();
+  const { remove, create } = useRunActions(jobId);
+  const { id: _id, version: _version, ...input } = run;
+  const removeIt = async () => {
+    setBusy(true);
+    try {
+      await remove(run);
+      const undo = () => void create(input, crypto.randomUUID());
+      toast({ text: `${run.number} is removed.`, action: { label: 'Undo', onPress: undo } });
+      onRemoved();
+    } catch (error) {
+      toast({ text: error instanceof Error ? `Not removed: ${error.message}` : 'Not removed.' });
+    } finally {
+      setBusy(false);
+      setAsks(false);
+    }
+  };
+  return (
+    <>
+      <LinkButton label="Study" href={{ pathname: '/jobs/[job]/runs/[run]', params: { job: jobId, run: run.id } }} />
+      <Button label="Another like it" onPress={onCopy} />
+      <Button label="Remove" name={`Remove run ${run.number}`} onPress={() => setAsks(true)} />
+      {asks ? (
+        <ConfirmDialog
+          title={`Remove run ${run.number}?`}
+          confirm="Remove"
+          busy={busy}
+          onConfirm={() => void removeIt()}
+          onCancel={() => setAsks(false)}
+        >
+          Its length, fittings and note go with it. Revisions that were frozen keep it.
+        </ConfirmDialog>
+      ) : null}
+    </>
+  );
+}

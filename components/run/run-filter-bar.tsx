@@ -1,0 +1,41 @@
+import { StyleSheet, View } from 'react-native';
+
+import { space } from '@/components/theme/tokens';
+import { Button } from '@/components/ui/button';
+import { Select } from '@/components/ui/select';
+
+import type { FilterChoice, FilterKey, RunFilter } from './run-filters';
+
+type RunFilterBarProps = {
+  choices: readonly FilterChoice[];
+  filter: RunFilter;
+  onChange: (key: FilterKey, value: string) => void;
+  onClear: () => void;
+};
+
+const all = 'all';
+
+/** One list for each thing that runs can be narrowed by; "all" first. */
+export function RunFilterBar({ choices, filter, onChange, onClear }: RunFilterBarProps) {
+  const isNarrowed = Object.values(filter).some(Boolean);
+  return (
+    <View role="group" aria-label="Narrow the list" style={styles.bar}>
+      {choices.map(({ key, label, options }) => (
+        <View key={key} style={styles.filter}>
+          <Select<string>
+            label={label}
+            value={filter[key] || all}
+            options={[{ value: all, label: 'All' }, ...options]}
+            onChange={(value) => onChange(key, value === all ? '' : value)}
+          />
+        </View>
+      ))}
+      {isNarrowed ? <Button label="Show all" onPress={onClear} /> : null}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  bar: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'flex-end', gap: space.sm },
+  filter: { minWidth: 132, flexGrow: 1, flexShrink: 1, flexBasis: 132, maxWidth: 260 },
+});
