@@ -9,7 +9,7 @@ import { Element } from './element';
 import { described, ProblemText, type FieldWords } from './field';
 import { Text } from './text';
 
-export type CheckboxProps = FieldWords & {
+export type CheckboxProps = Omit<FieldWords, 'hideLabel'> & {
   checked: boolean;
   onChange: (checked: boolean) => void;
   onBlur?: () => void;

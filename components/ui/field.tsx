@@ -9,16 +9,22 @@ import { Element } from './element';
 import { Text } from './text';
 
 /** What every field has: a label always, a hint where one helps, and what is wrong with it. */
-export type FieldWords = { label: string; hint?: string; problem?: string };
+export type FieldWords = {
+  label: string;
+  /** the label is read, not drawn: the head of a column says it */
+  hideLabel?: boolean;
+  hint?: string;
+  problem?: string;
+};
 
 type FieldProps = FieldWords & { id: string; optional?: boolean; children: ReactNode };
 
 /** Label above, the control, then hint and problem, which `described` ties to the control. */
-export function Field({ id, label, hint, problem, optional, children }: FieldProps) {
+export function Field({ id, label, hideLabel, hint, problem, optional, children }: FieldProps) {
   const theme = useTheme();
   return (
     <View style={styles.field}>
-      <Element tag="label" htmlFor={id} style={[styles.label, { color: theme.ink }]}>
+      <Element tag="label" htmlFor={id} style={[styles.label, { color: theme.ink }, hideLabel && styles.said]}>
         {label}
         {optional ? (
           <Element tag="span" style={[styles.optional, { color: theme.inkSoft }]}>
@@ -84,4 +90,5 @@ const styles = StyleSheet.create({
   field: { gap: space.xxs, minWidth: 0 },
   label: { fontFamily, ...type.body, fontWeight: weight.strong },
   optional: { fontWeight: weight.regular },
+  said: webStyle({ position: 'absolute', width: 1, height: 1, overflow: 'hidden', clipPath: 'inset(50%)' }),
 });

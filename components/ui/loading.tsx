@@ -2,9 +2,8 @@ import { StyleSheet, View } from 'react-native';
 
 import { hairline, radius, space } from '@/components/theme/tokens';
 import { useTheme } from '@/components/theme/use-theme';
-import { webStyle } from '@/components/theme/web-style';
 
-import { Text } from './text';
+import { Hidden } from './hidden';
 
 /** What will stand there: lines of a list, rows of a table, cards, fields, or a drawing with its sentence. */
 export type Shape = 'list' | 'table' | 'cards' | 'form' | 'study';
@@ -13,9 +12,7 @@ export type Shape = 'list' | 'table' | 'cards' | 'form' | 'study';
 export function Loading({ label, shape = 'list' }: { label: string; shape?: Shape }) {
   return (
     <View role="status" aria-busy style={styles.shape}>
-      <View style={styles.said}>
-        <Text>{`Loading: ${label}`}</Text>
-      </View>
+      <Hidden>{`Loading: ${label}`}</Hidden>
       {shape === 'study' ? <Drawing /> : Array.from({ length: 6 }, (_, index) => <Line key={index} shape={shape} />)}
     </View>
   );
@@ -55,7 +52,6 @@ function Drawing() {
 
 const styles = StyleSheet.create({
   shape: { gap: 0 },
-  said: webStyle({ position: 'absolute', width: 1, height: 1, overflow: 'hidden', clipPath: 'inset(50%)' }),
   line: {
     flexDirection: 'row',
     alignItems: 'center',

@@ -21,13 +21,15 @@ export type SegmentedProps<Value extends string = string> = {
   onBlur?: () => void;
   hint?: string;
   problem?: string;
+  /** as wide as its place, in equal parts */
+  fill?: boolean;
 };
 
 const steps: Record<string, number> = { ArrowRight: 1, ArrowDown: 1, ArrowLeft: -1, ArrowUp: -1 };
 
 /** One of a few, all in sight. One stop for the Tab key; arrows walk and choose. */
 export function Segmented<Value extends string>(props: SegmentedProps<Value>) {
-  const { label, hideLabel = false, value, segments, onChange, onBlur, hint, problem } = props;
+  const { label, hideLabel, value, segments, onChange, onBlur, hint, problem, fill } = props;
   const theme = useTheme();
   const id = useId();
   const group = useRef<HTMLDivElement>(null);
@@ -58,7 +60,7 @@ export function Segmented<Value extends string>(props: SegmentedProps<Value>) {
         aria-describedby={problem ? `${id}-problem` : hint ? `${id}-hint` : undefined}
         onKeyDown={walk}
         onBlur={onBlur}
-        style={[styles.group, { borderColor: theme.rule, backgroundColor: theme.sheet }]}
+        style={[styles.group, fill && styles.fill, { borderColor: theme.rule, backgroundColor: theme.sheet }]}
       >
         {segments.map((segment, index) => (
           <Choice
@@ -68,6 +70,7 @@ export function Segmented<Value extends string>(props: SegmentedProps<Value>) {
             // with nothing chosen yet the first one is where Tab arrives
             reachable={index === Math.max(at, 0)}
             onChoose={() => onChange(segment.value)}
+            fill={fill}
           />
         ))}
       </Element>
@@ -81,9 +84,9 @@ export function Segmented<Value extends string>(props: SegmentedProps<Value>) {
   );
 }
 
-type ChoiceProps = { segment: Segment; chosen: boolean; reachable: boolean; onChoose: () => void };
+type ChoiceProps = { segment: Segment; chosen: boolean; reachable: boolean; onChoose: () => void; fill?: boolean };
 
-function Choice({ segment, chosen, reachable, onChoose }: ChoiceProps) {
+function Choice({ segment, chosen, reachable, onChoose, fill }: ChoiceProps) {
   const theme = useTheme();
   const colours = chosen
     ? { backgroundColor: theme.paper, borderColor: theme.oxide, color: theme.ink }
@@ -97,7 +100,7 @@ function Choice({ segment, chosen, reachable, onChoose }: ChoiceProps) {
       aria-label={segment.name}
       tabIndex={reachable ? 0 : -1}
       onClick={onChoose}
-      style={[styles.choice, colours, chosen && styles.chosen]}
+      style={[styles.choice, colours, chosen && styles.chosen, fill && styles.part]}
     >
       {segment.label}
     </Element>
@@ -133,4 +136,6 @@ const styles = StyleSheet.create({
     cursor: 'pointer',
   }),
   chosen: { fontWeight: weight.strong },
+  fill: { alignSelf: 'stretch' },
+  part: webStyle({ flex: 1, paddingLeft: space.xxs, paddingRight: space.xxs }),
 });

@@ -24,7 +24,14 @@ export type SelectProps<Value extends string = string> = FieldWords & {
 };
 
 /** The browser's own list: known to every keyboard, phone and screen reader. Values must differ. */
-export function Select<Value extends string>({ label, hint, problem, optional, ...control }: SelectProps<Value>) {
+export function Select<Value extends string>({
+  label,
+  hideLabel,
+  hint,
+  problem,
+  optional,
+  ...control
+}: SelectProps<Value>) {
   const theme = useTheme();
   const id = useId();
   const { options, placeholder, onChange, ...rest } = control;
@@ -33,7 +40,7 @@ export function Select<Value extends string>({ label, hint, problem, optional, .
     if (option) onChange(option.value);
   };
   return (
-    <Field id={id} label={label} hint={hint} problem={problem} optional={optional}>
+    <Field id={id} label={label} hideLabel={hideLabel} hint={hint} problem={problem} optional={optional}>
       <View style={styles.place}>
         <Element
           tag="select"

@@ -34,10 +34,10 @@ export type TextFieldProps = FieldWords & {
   maxLength?: number;
 };
 
-export function TextField({ label, hint, problem, optional, unit, ...control }: TextFieldProps) {
+export function TextField({ label, hideLabel, hint, problem, optional, unit, ...control }: TextFieldProps) {
   const id = useId();
   return (
-    <Field id={id} label={label} hint={hint} problem={problem} optional={optional}>
+    <Field id={id} label={label} hideLabel={hideLabel} hint={hint} problem={problem} optional={optional}>
       <View style={styles.place}>
         <Box id={id} hint={hint} problem={problem} unit={unit} {...control} />
         {unit ? (

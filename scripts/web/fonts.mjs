@@ -11,7 +11,7 @@ const ranges = [
   [0x2010, 0x2015],
   [0x2018, 0x201e],
 ];
-const signs = '•…′″€™←↑→↓−√∞≈≠≤≥✓✗ΔΣΩαβγδεηθλμνπρστφψω⁰¹²³⁴⁵⁶⁷⁸⁹₀₁₂₃₄₅₆₇₈₉⅛⅜⅝⅞\u202f';
+const signs = '•…′″€™‹›▲▼←↑→↓−√∞≈≠≤≥✓✗ΔΣΩαβγδεηθλμνπρστφψω⁰¹²³⁴⁵⁶⁷⁸⁹₀₁₂₃₄₅₆₇₈₉⅛⅜⅝⅞\u202f';
 const span = ([from, to]) => String.fromCodePoint(...Array.from({ length: to - from + 1 }, (_, index) => from + index));
 
 /** Web copies of the fonts that the PDF uses: Latin and the signs of the trade, woff2. */
