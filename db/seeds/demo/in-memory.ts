@@ -60,7 +60,6 @@ function inMemory() {
       change: async (_member, seen, input) => specification.change(seen, input, input.version),
     },
     run: { patch },
-    revision: { freeze: neverSent, send: neverSent },
   };
   const data = () =>
     jobDataSchema.parse({
@@ -77,8 +76,6 @@ function inMemory() {
     });
   return { services, data };
 }
-
-const neverSent = () => Promise.reject(new Error('Nothing is sent from memory'));
 
 const member: Member = { ...demoEstimator, accountId: randomUUID(), firmId: randomUUID(), units: 'SI' };
 

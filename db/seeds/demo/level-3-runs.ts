@@ -23,10 +23,9 @@ export const demoLevel3Runs: DemoRun[] = [
     length: '86',
     elevation: '2',
     fittings: { 'elbow-90': 9, tee: 4, 'flanged-valve': 3, 'flange-pair': 3, hanger: 29 },
-    override: departure(
-      'Drawing M-401 note 4 shows 38 mm on this size, the specification 76 mm: taken as drawn',
-      { layers: [layer('mf_pipe', 'in:1.5')] },
-    ),
+    override: departure('Drawing M-401 note 4 shows 38 mm on this size, the specification 76 mm: taken as drawn', {
+      layers: [layer('mf_pipe', 'in:1.5')],
+    }),
   }),
   pipe({
     number: 'R31',

@@ -37,11 +37,13 @@ export type SeedServices = {
     ): Promise<SpecificationRow>;
   };
   run: { patch(member: Member, job: string, batch: RunsPatch): Promise<unknown> };
-  revision: {
-    freeze(member: Member, job: string): Promise<Revision>;
-    send(member: Member, revision: string, input: SendInput): Promise<Revision>;
-  };
+};
+
+/** What freezes a revision and sends it. */
+export type RevisionServices = {
+  revision: { freeze(member: Member, job: string): Promise<Revision> };
+  revisionSending: { send(member: Member, revision: string, input: SendInput): Promise<Revision> };
 };
 
 /** Services at the moment that a clock shows. */
-export type ServicesAt = (clock: () => Date) => SeedServices;
+export type ServicesAt = (clock: () => Date) => SeedServices & RevisionServices;
