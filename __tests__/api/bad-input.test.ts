@@ -18,6 +18,8 @@ import {
 import { asJson, badFor, leavesOf, spoilt } from '../support/spoil';
 import { startStack, type Stack } from '../support/stack';
 
+jest.setTimeout(60_000); // hundreds of requests
+
 let stack: Stack;
 let agent: Agent;
 let made: TestJob;

@@ -14,6 +14,8 @@ import {
 } from '../support/job-inputs';
 import { startStack, type Stack } from '../support/stack';
 
+jest.setTimeout(60_000); // hundreds of requests
+
 let stack: Stack;
 let agent: Agent;
 let stranger: Agent;

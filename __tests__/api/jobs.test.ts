@@ -115,6 +115,6 @@ describe('what was frozen and sent', () => {
     const { body: jobs } = await agent.get('/api/jobs').expect(200);
     expect(jobs).toContainEqual(expect.objectContaining({ number: 'REV-1', lastRevision: 'B' }));
     const { body } = await agent.delete(`/api/contacts/${contact.id}?version=1`).expect(409);
-    expect(body.detail).toBe('Something was sent to this contact: it stays on the record');
+    expect(body.detail).toBe('A takeoff was sent to this contact: the record names it');
   });
 });

@@ -7,6 +7,8 @@ import { newJob, type Agent, type TestJob } from '../support/job';
 import { runInput, typed } from '../support/job-inputs';
 import { startStack, type Stack } from '../support/stack';
 
+jest.setTimeout(60_000); // hundreds of requests
+
 let stack: Stack;
 let agent: Agent;
 let foreman: Agent;

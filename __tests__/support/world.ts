@@ -29,7 +29,10 @@ export async function newWorld(agent: Agent): Promise<World> {
   const buildUp = buildUpInput(service.id);
   const specification = specificationInput(service.id);
   const run = { ...runInput(where), id: crypto.randomUUID(), version: null };
-  await agent.patch(`${path}/runs`).send({ put: [run], drop: [] }).expect(200);
+  await agent
+    .patch(`${path}/runs`)
+    .send({ put: [run], drop: [] })
+    .expect(200);
   const ids = {
     'jobs/:job': job.id,
     'contacts/:contact': String(contact.body.id),

@@ -39,10 +39,9 @@ export function createContactService({ withFirm }: { withFirm: WithFirm }) {
         await current(behind, seen);
         const jobs = await behind.contacts.jobsNaming(seen.id);
         if (jobs.length > 0) throw new AppError('conflict', inUse(jobs));
-        const messages = await behind.contacts.messagesTo(seen.id);
-        if (messages > 0) throw new AppError('conflict', 'Something was sent to this contact: it stays on the record');
-        if (await behind.messages.everSentTo(seen.id))
+        if (await behind.messages.everSentTo(seen.id)) {
           throw new AppError('conflict', 'A takeoff was sent to this contact: the record names it');
+        }
         await behind.contacts.remove(seen);
       });
     },

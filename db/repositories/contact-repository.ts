@@ -52,13 +52,6 @@ export function createContactRepository(transaction: Knex.Transaction, firmId: s
         .select('j.number');
       return rows.map(({ number }) => number);
     },
-    /** How many messages were written to this contact. */
-    async messagesTo(id: string): Promise<number> {
-      const rows: { count: number }[] = await transaction('messages')
-        .where({ firm_id: firmId, contact_id: id })
-        .count();
-      return rows[0]!.count;
-    },
   };
 }
 export type ContactRepository = ReturnType<typeof createContactRepository>;
