@@ -3,7 +3,7 @@ import type { Words } from '../words';
 import { nextThinner } from './candidates';
 import { failing, governingOf, isBare, weight } from './choosing';
 import { shortfall } from './shortfall';
-import type { Candidate, LimitKind, Study } from './study-types';
+import type { Candidate, LimitKind, LimitVerdict, Study } from './study-types';
 
 type Told = Pick<Study, 'candidates' | 'specified' | 'proposed' | 'meets'>;
 
@@ -30,18 +30,24 @@ function falling({ candidates }: Told, candidate: Candidate): Words {
     return [subject(candidate), ' cannot be told: ', ...first.because, '.'];
   }
   if (first.kind === 'material') return [subject(candidate), ' does not do: ', ...first.because, '.'];
-  return [subject(candidate), ' is not enough. It ', ...shortfall(first, candidate, candidates), '.'];
+  return [subject(candidate), ' is not enough. It ', ...reason(first, candidate, { at: 0, candidates })];
 }
 
 /** "114 mm meets every limit; the energy code governs: 102 mm falls one size short." */
-function standing({ candidates, meets }: Told, place: number, candidate: Candidate): Words {
+function standing({ candidates, meets, proposed }: Told, place: number, candidate: Candidate): Words {
   const thinner = thinnerThan(candidates, place);
   const governing = governingOf(candidates, place, meets);
   const verdict = thinner && failing(thinner).find(({ kind }) => kind === governing);
-  if (!thinner || !governing || !verdict) return [subject(candidate), ' meets every limit; so would less.'];
+  if (!thinner || !governing || !verdict)
+    return [subject(candidate), ' meets every limit', ...soWould(candidates, proposed, place)];
   const words = shortfall(verdict, thinner, candidates);
-  const of = isBare(thinner) ? 'bare it ' : [subject(thinner), ' '];
-  return [subject(candidate), ' meets every limit; ', `${limitWords[governing]} governs: `, ...of, ...words, '.'];
+  const who: Words = isBare(thinner) ? ['bare it '] : [subject(thinner), ' '];
+  return [subject(candidate), ` meets every limit; ${limitWords[governing]} governs: `, ...who, ...words, '.'];
+}
+
+function soWould(candidates: readonly Candidate[], proposed: number | null, place: number): Words {
+  const less = proposed === null || proposed >= place ? undefined : candidates[proposed];
+  return less ? ['; so would ', subject(less), '.'] : ['.'];
 }
 
 function nothingMeets({ candidates, meets }: Told): Words {
@@ -58,30 +64,41 @@ function nothingMeets({ candidates, meets }: Told): Words {
   return [`Nothing made meets ${listed(never)}`, ...said, '.'];
 }
 
-/** Why no thinner than the proposed; and what the specified one lacks is said with what would do. */
+/** Why no thinner than the proposed; where another is specified, first that the proposed is the thinnest that does. */
 export function whyNotThinnerOf(study: Told): Words {
   const { candidates, proposed, specified } = study;
   const candidate = proposed === null ? undefined : candidates[proposed];
   if (proposed === null || !candidate) return nothingMeets(study);
-  const isChange = specified !== null && specified !== proposed;
-  const start: Words = isChange ? [subject(candidate), ' is the thinnest made that meets every limit. '] : [];
   const thinner = thinnerThan(candidates, proposed);
-  if (!thinner) return [...start, 'Nothing thinner is made.'];
-  const reasons = failing(thinner).sort((one, other) => weight(one.kind) - weight(other.kind));
-  if (reasons.length === 0) {
-    return [...start, subject(candidate), ' is the thinnest made; bare would meet every limit entered.'];
-  }
-  const sentences = reasons.flatMap((verdict, at) => {
-    const who: Words =
-      at > 0
-        ? ['It ']
-        : isBare(thinner)
-          ? [subject(candidate), ' is the thinnest made. Bare it ']
-          : [subject(thinner), ' '];
-    return [...(at > 0 ? [' '] : []), ...who, ...shortfall(verdict, thinner, candidates), '.'];
-  });
-  return [...start, ...sentences];
+  if (!thinner || isBare(thinner))
+    return [...thinnestMade(candidate), ...(thinner ? bareWould(thinner, candidates) : [])];
+  const isOther = specified !== null && specified !== proposed;
+  const start: Words = isOther ? [subject(candidate), ' is the thinnest made that meets every limit. '] : [];
+  return [...start, subject(thinner), ' ', ...reasons(thinner, candidates)];
 }
+
+const thinnestMade = (candidate: Candidate): Words => [
+  subject(candidate),
+  ' is the thinnest made, and meets every limit.',
+];
+
+function bareWould(bare: Candidate, candidates: readonly Candidate[]): Words {
+  const because = reasons(bare, candidates);
+  return because.length > 0 ? [' Bare it ', ...because] : [' Bare would meet every limit entered too.'];
+}
+
+function reasons(thinner: Candidate, candidates: readonly Candidate[]): Words {
+  const ordered = failing(thinner).sort((one, other) => weight(one.kind) - weight(other.kind));
+  return ordered.flatMap((verdict, at) => reason(verdict, thinner, { at, candidates }));
+}
+
+type Reason = { at: number; candidates: readonly Candidate[] };
+
+const reason = (verdict: LimitVerdict, thinner: Candidate, { at, candidates }: Reason): Words => [
+  ...(at > 0 ? [' It '] : []),
+  ...shortfall(verdict, thinner, candidates),
+  verdict.kind === 'energy-code' && verdict.unit === 'dimension' ? ' of the energy code.' : '.',
+];
 
 function thinnerThan(candidates: readonly Candidate[], place: number): Candidate | undefined {
   const builds = candidates.map(({ layerThicknesses }) => ({ thicknesses: layerThicknesses }));

@@ -38,7 +38,7 @@ function tooCold({ value, dewPoint, margin, state }: LimitVerdict): Words {
       amount('temperature', dewPoint),
     ];
   }
-  const above = amount('difference', value - dewPoint, 1);
+  const above = amount('difference', value - dewPoint);
   return [
     'would stay only ',
     above,
@@ -54,16 +54,16 @@ function tooMuchHeat({ value, limit, unit }: LimitVerdict, { heat }: Candidate):
   return [verb, amount(kind, value ?? NaN), '; the limit is ', amount(kind, limit ?? NaN)];
 }
 
+/** Follows "falls": the sentence that holds it names the energy code. */
 function tooThin(verdict: LimitVerdict, candidate: Candidate, candidates: readonly Candidate[]): Words {
-  const { value, limit, unit, because } = verdict;
-  if (value === null || limit === null) return ['falls short: ', ...because];
-  if (unit === 'resistance') {
+  const { value, limit, unit } = verdict;
+  if (unit === 'resistance' && value !== null && limit !== null) {
     return ['has an R of ', amount('resistance', value), '; the table entered asks for ', amount('resistance', limit)];
   }
-  if (isBare(candidate)) return ['falls short of the table entered'];
+  if (isBare(candidate)) return ['falls short'];
   const sizes = sizesShort(candidate, candidates);
-  if (sizes === 1) return ['falls one size short'];
-  return sizes === null ? ['falls short: ', ...because] : [`falls ${count(sizes)} sizes short`];
+  if (sizes === null) return ['falls short'];
+  return [sizes === 1 ? 'falls one size short' : `falls ${count(sizes)} sizes short`];
 }
 
 /** How many made sizes lie from this one up to the first that meets the energy code. */

@@ -76,12 +76,14 @@ const usualLayer = 0.0762; // m; thicker is usually put up in two layers, common
 const layerNotes = ({ names, thicknesses }: Build): string[] =>
   names.length === 1 && (thicknesses[0] ?? 0) > usualLayer + 0.01 ? ['Usually put up in two layers.'] : [];
 
-function studyNotes({ place, limits, states, method, body }: StudyInput): string[] {
+function studyNotes({ place, limits, states, method, body, codeExempt }: StudyInput): string[] {
   const has = (kind: LimitInput['kind']) => limits.some((limit) => limit.kind === kind);
   const isCold = states.some(({ nature }) => nature === 'cold');
   return [
     ...(place.outdoor && (has('touch') || has('dew-point')) ? ['Sun and the clear night sky are not counted.'] : []),
-    ...(isCold && has('energy-code') ? ['The energy code counts energy only: it promises no dry surface.'] : []),
+    ...(isCold && has('energy-code') && codeExempt === null
+      ? ['The energy code counts energy only: it promises no dry surface.']
+      : []),
     ...(method === 'iso-12241' && hasWind(place.conditions)
       ? [
           'Surface by ISO 12241: its wind formula for pipes gives about twice the coefficient of the ASTM C680 practice.',
