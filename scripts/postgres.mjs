@@ -1,4 +1,4 @@
-// This checkout's private PostgreSQL. Plain Node, no packages: node scripts/postgres.mjs start | stop | url | url-owner | psql
+// This checkout's private PostgreSQL. Plain Node, no packages: node scripts/postgres.mjs start | stop | status | url | url-owner | psql
 import { execFileSync, spawnSync } from 'node:child_process';
 import fs from 'node:fs';
 import path from 'node:path';
@@ -117,6 +117,7 @@ export function stop() {
 
 async function command([verb, ...rest]) {
   if (verb === 'stop') return stop();
+  if (verb === 'status') return void (process.exitCode = isRunning() ? 0 : 1);
   const { url: app, ownerUrl } = await start(verb === 'start' || !isRunning() ? 'by-hand' : '');
   if (verb === 'psql') process.exitCode = spawnSync('psql', [ownerUrl, ...rest], { stdio: 'inherit' }).status;
   else console.log(verb === 'url-owner' ? ownerUrl : app);

@@ -1,6 +1,7 @@
 // The demo: enters what is not there yet. Prints who can sign in, a line each.
 import { systemClock } from '@/api/adapters/clock';
 import { readConfig } from '@/api/config';
+import { roles } from '@/api/contracts/permission';
 import type { Member } from '@/api/contracts/session';
 import { createLogger } from '@/api/logger';
 import { startQueue } from '@/api/queue/queue';
@@ -24,7 +25,7 @@ async function main(): Promise<void> {
     const owner = await findOwner();
     await seedDemo({ owner, member, together: wireTogether(parts), clock: systemClock, password }).finally(async () => {
       const founded = owner ?? (await findOwner());
-      if (founded) for (const person of await member.list(founded)) console.log(describe(person));
+      if (founded) (await member.list(founded)).sort(byRole).forEach((person) => console.log(describe(person)));
     });
   } finally {
     await boss.stop({ graceful: false });
@@ -37,8 +38,10 @@ async function find(doors: Doors, session: Services['session']): Promise<Member 
   return account && session.member(account.firm_id, account.account_id);
 }
 
+const byRole = (a: Member, b: Member) => roles.indexOf(a.role) - roles.indexOf(b.role);
+
 const describe = ({ email, role, maySend }: Member) =>
-  `${email}  ${role}${role === 'estimator' ? `, ${maySend ? 'may' : 'may not'} send` : ''}`;
+  `${email.padEnd(40)}${role}${role === 'estimator' ? `, ${maySend ? 'may' : 'may not'} send` : ''}`;
 
 main().catch((error: unknown) => {
   console.error(error instanceof Error ? error.message : error);

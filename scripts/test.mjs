@@ -64,7 +64,12 @@ async function browser() {
     const password = /^Password +(\S+)/m.exec(said)?.[1];
     const read = ({ stats }) => [stats.expected + stats.flaky, stats.unexpected];
     const seen = { BASE_URL: address('Thickset'), INBOX_URL: address('Inbox'), DEMO_PASSWORD: password };
-    return await reported([module('@playwright/test/cli.js'), 'test'], { file: 'e2e.json', read, env: seen });
+    const counts = await reported([module('@playwright/test/cli.js'), 'test'], { file: 'e2e.json', read, env: seen });
+    app.kill('SIGTERM');
+    await gone;
+    const left = await leftRunning([seen.BASE_URL, seen.INBOX_URL], env);
+    if (left) console.error(`Still running after npm start was stopped: ${left}`);
+    return left ? [counts[0], counts[1] + 1] : [counts[0] + 1, counts[1]];
   } catch (error) {
     console.error(error.message);
     return [0, 1];
@@ -72,6 +77,18 @@ async function browser() {
     app.kill('SIGTERM');
     await gone;
   }
+}
+
+/** Stopping is a test too: what still answers, or the database that still runs. */
+async function leftRunning(addresses, env) {
+  const answers = (address) =>
+    fetch(address).then(
+      () => [address],
+      () => [],
+    );
+  const answering = (await Promise.all(addresses.map(answers))).flat();
+  const database = (await run(['scripts/postgres.mjs', 'status'], env)) === 0 ? ['PostgreSQL'] : [];
+  return [...answering, ...database].join(', ');
 }
 
 /** Resolves with what npm start printed when it says how to stop it: its last line. */

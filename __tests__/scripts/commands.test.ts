@@ -1,4 +1,5 @@
 import { execFile, spawn } from 'node:child_process';
+import { createHash, randomUUID } from 'node:crypto';
 import fs from 'node:fs';
 import net from 'node:net';
 import os from 'node:os';
@@ -69,7 +70,7 @@ describe('npm start', () => {
 });
 
 describe('the server', () => {
-  it('says in one sentence which configuration it refuses, and when its port is in use', async () => {
+  it('says in one sentence which configuration it refuses', async () => {
     const environment = {
       SESSION_SECRET: 'sixteen letters!',
       HOST: '0.0.0.0',
@@ -82,6 +83,66 @@ describe('the server', () => {
       /^SESSION_SECRET must have at least 32 random characters while HOST is 0\.0\.0\.0.*\.\n$/,
     );
   }, 30_000);
+});
+
+describe('the server, asked to stop', () => {
+  const environment = { SESSION_SECRET: 'sixteen letters!', LOG_LEVEL: 'silent', NODE_ENV: 'production' };
+
+  /** A server on the tests' database, ready to answer. */
+  async function serving(port: number) {
+    const child = spawn(process.execPath, ['--import', 'tsx', 'api/server.ts'], {
+      cwd: root,
+      env: { ...process.env, ...environment, PORT: String(port) },
+      stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
+    });
+    const ended = new Promise<number | null>((resolve) => child.once('exit', resolve));
+    const url = `http://127.0.0.1:${port}/api`;
+    for (let tries = 0; tries < 300; tries += 1) {
+      if ((await fetch(`${url}/ready`).catch(() => undefined))?.ok) break;
+      await new Promise((resolve) => setTimeout(resolve, 100));
+    }
+    return { child, ended, url };
+  }
+
+  /** Resolves when the try has been counted. */
+  async function counted(email: string) {
+    const owner = connect(process.env.OWNER_DATABASE_URL ?? '', 1);
+    const key = `sign-in ${createHash('sha256').update(email).digest('hex')}`;
+    for (let tries = 0; tries < 500 && !(await owner('tries').where({ key }).first()); tries += 1);
+    await owner.destroy();
+  }
+
+  async function freePort() {
+    const server = await busyPort();
+    const port = portOf(server);
+    await new Promise((resolve) => server.close(resolve));
+    return port;
+  }
+
+  it('finishes the request that it is working on, then ends by itself', async () => {
+    const { child, ended, url } = await serving(await freePort());
+    const email = `${randomUUID()}@nowhere.example`;
+    const running = fetch(`${url}/session`, {
+      method: 'POST',
+      headers: { 'Content-Type': 'application/json', 'X-Thickset': '1' },
+      body: JSON.stringify({ email, password: 'compared with a hash of cost 12' }),
+    });
+    await counted(email); // and now it compares the password
+    child.kill('SIGTERM');
+    expect((await running).status).toBe(401);
+    expect(await ended).toBe(0);
+    await expect(fetch(`${url}/health`)).rejects.toThrow();
+  }, 60_000);
+
+  it('or left alone by whoever started it, ends too; and a port in use is one sentence', async () => {
+    const port = await freePort();
+    const { child, ended } = await serving(port);
+    const second = await run(['--import', 'tsx', 'api/server.ts'], { ...environment, PORT: String(port) });
+    expect(second.stderr).toBe(`Port ${port} is in use: choose another with PORT.\n`);
+    expect(second.code).toBe(1);
+    child.disconnect();
+    expect(await ended).toBe(0);
+  }, 60_000);
 });
 
 describe('npm run reset', () => {
