@@ -1,7 +1,9 @@
-import useSWR from 'swr';
+import useSWR, { useSWRConfig } from 'swr';
 
+import type { Override, Run } from '@/api/contracts/run';
 import { runStudySchema, workingSchema, type RunStudy, type Working } from '@/api/contracts/study';
-import { request, type RequestFailed } from '@/hooks/request';
+import { request, RequestFailed } from '@/hooks/request';
+import { usePatchRuns } from '@/hooks/use-runs';
 
 const studyPath = (jobId: string, runId: string) => `/jobs/${jobId}/runs/${runId}`;
 
@@ -29,4 +31,20 @@ export function useWorking({ jobId, runId }: { jobId: string; runId: string }, a
     request(path, workingSchema),
   );
   return { working: data, problem: error?.problem, reload: () => void mutate() };
+}
+
+/** Returns a function that writes a run's departure from the specification. A stale one shows what others made of the run meanwhile. @throws RequestFailed */
+export function useSaveOverride(jobId: string) {
+  const patch = usePatchRuns(jobId);
+  const { mutate } = useSWRConfig();
+  return async (run: Run, override: Override | null): Promise<Run> => {
+    try {
+      const saved = await patch({ put: [{ ...run, override }], drop: [] });
+      return saved[0] ?? run;
+    } catch (error) {
+      if (error instanceof RequestFailed && error.problem.type === '/problems/stale')
+        await mutate((key) => typeof key === 'string' && key.startsWith(`/jobs/${jobId}`));
+      throw error;
+    }
+  };
 }

@@ -1,0 +1,20 @@
+import { Link } from '@/components/ui/link';
+import { Row } from '@/components/ui/stack';
+import { Text } from '@/components/ui/text';
+
+import type { Neighbours } from './neighbours';
+
+/** On to the next run without the way over the list. */
+export function NeighbourLinks({ jobId, neighbours }: { jobId: string; neighbours: Neighbours }) {
+  const { before, after, words } = neighbours;
+  const to = (run: string) => ({ pathname: '/jobs/[job]/runs/[run]', params: { job: jobId, run } }) as const;
+  return (
+    <Row gap="md" role="navigation" aria-label="Runs before and after">
+      {before ? <Link href={to(before.id)} label={`‹ ${before.number}`} /> : null}
+      <Text tone="inkSoft" numeric>
+        {words}
+      </Text>
+      {after ? <Link href={to(after.id)} label={`${after.number} ›`} /> : null}
+    </Row>
+  );
+}
