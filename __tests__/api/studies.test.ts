@@ -3,7 +3,7 @@ import { randomUUID } from 'node:crypto';
 import { judgementSchema } from '@/api/contracts/judgement';
 import type { Run } from '@/api/contracts/run';
 import { scheduleSchema, takeoffSchema } from '@/api/contracts/schedule';
-import { runStudySchema } from '@/api/contracts/study';
+import { runStudySchema, workingSchema } from '@/api/contracts/study';
 import type { Member } from '@/api/contracts/session';
 import { wireTogether } from '@/api/wiring';
 import { enterAddendum } from '@/db/seeds/demo/addendum-1';
@@ -59,6 +59,18 @@ it('studies one run: what is put up, and every thickness that is made', async ()
     body: { shape: 'cylinder', width: 0.1143 },
   });
   expect(study.study.candidates[study.used!]!.name).toBe('in:1.5');
+});
+
+it('opens the working of a number', async () => {
+  const working = (query: string) => agent.get(`${path}/runs/${runOf('R30').id}/working?${query}`);
+  for (const about of ['heat-flow', 'surface', 'touch', 'energy-code']) {
+    const { steps } = workingSchema.parse((await working(`candidate=2&about=${about}`).expect(200)).body);
+    expect(steps.length).toBeGreaterThan(0);
+  }
+  await working('candidate=2&about=nonsense').expect(400);
+  await working('candidate=-1&about=touch').expect(400);
+  await working('candidate=99&about=touch').expect(422);
+  await working('candidate=2&about=dew-point').expect(422);
 });
 
 it('follows a change of a run at once', async () => {

@@ -131,3 +131,10 @@ export const workingSchema = z.object({
   engineVersion: z.string(),
 });
 export type Working = z.infer<typeof workingSchema>;
+
+/** Which number of a study is opened; in a query a number is text. */
+export const workingAskedSchema = z.object({
+  candidate: z.coerce.number({ error: 'Must be a number' }).int('Must be a whole number').min(0),
+  about: z.enum(['surface', ...limitKinds]),
+});
+export type WorkingAsked = z.infer<typeof workingAskedSchema>;

@@ -2,7 +2,8 @@ import type { JobData } from '@/api/contracts/job-data';
 import type { Judgement } from '@/api/contracts/judgement';
 import type { Schedule, Takeoff } from '@/api/contracts/schedule';
 import type { Member } from '@/api/contracts/session';
-import type { RunStudy } from '@/api/contracts/study';
+import type { RunStudy, Working, WorkingAsked } from '@/api/contracts/study';
+import { working } from '@/api/engine/limits/working';
 import { AppError } from '@/api/errors';
 import type { WithFirm } from '@/db/with-firm';
 
@@ -38,6 +39,12 @@ export function createStudyService({ withFirm }: { withFirm: WithFirm }) {
       const study = runStudy(judged);
       if (!study) throw noStudy(judged);
       return study;
+    },
+    /** @throws AppError `cannot-calculate` when the run has no study; EngineError when it has no such thickness or limit */
+    async working(member: Member, { job, run }: { job: string; run: string }, asked: WorkingAsked): Promise<Working> {
+      const judged = await judgeOne(member, job, run);
+      if (!judged.input || !judged.study) throw noStudy(judged);
+      return working(judged.input, asked);
     },
     async schedule(member: Member, job: string): Promise<Schedule> {
       const data = await load(member, job);

@@ -6,7 +6,7 @@ type Revising = Omit<Entering, 'services'> & { services: RevisionServices };
 /** Freezes what is entered and sends it to the client, as it went out five days ago. */
 export async function sendRevisionA({ services, member }: Revising, { job, ids }: Entered): Promise<void> {
   const revision = await services.revision.freeze(member, job.id);
-  await services.revisionSending.send(member, revision.id, {
+  await services.revision.send(member, revision.id, {
     contactIds: [idOf(ids.contacts, 'marisel')],
     subject: `${job.number} ${job.name}: insulation takeoff, Revision ${revision.letter}`,
     words: [

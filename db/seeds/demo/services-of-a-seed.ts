@@ -41,8 +41,10 @@ export type SeedServices = {
 
 /** What freezes a revision and sends it. */
 export type RevisionServices = {
-  revision: { freeze(member: Member, job: string): Promise<Revision> };
-  revisionSending: { send(member: Member, revision: string, input: SendInput): Promise<Revision> };
+  revision: {
+    freeze(member: Member, job: string): Promise<Revision>;
+    send(member: Member, revision: string, input: SendInput): Promise<Revision>;
+  };
 };
 
 /** Services at the moment that a clock shows. */
