@@ -40,7 +40,6 @@ export function Button({ label, onPress, tone = 'quiet', submit, formId, name, .
       form={formId}
       aria-label={name}
       aria-busy={busy}
-      aria-disabled={busy || undefined}
       disabled={disabled}
       onClick={(event) => (busy ? event.preventDefault() : onPress?.())}
       style={[

@@ -4,7 +4,7 @@ import { Text, Words } from './text';
 
 export type Verdict = 'pass' | 'caution' | 'fail' | 'none';
 
-const signs: Record<Verdict, string> = { pass: '✓', caution: '!', fail: '✕', none: '–' };
+const signs: Record<Verdict, string> = { pass: '✓', caution: '!', fail: '✗', none: '–' };
 const tones = { pass: 'pass', caution: 'caution', fail: 'fail', none: 'inkSoft' } as const;
 
 type MarkProps = {

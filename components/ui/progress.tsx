@@ -50,10 +50,10 @@ const styles = StyleSheet.create({
   words: { flexDirection: 'row', justifyContent: 'space-between', gap: space.sm },
   track: { height: 4, borderRadius: 2, overflow: 'hidden' },
   bar: { height: 4, borderRadius: 2 },
-  // public/index.html has the movement, and its rest for those who ask for less of it
+  // public/index.html slows it down for those who ask for less movement
   unknown: webStyle({
     width: '30%',
-    animationName: 'wander',
+    animationKeyframes: { from: { transform: 'translateX(-100%)' }, to: { transform: 'translateX(340%)' } },
     animationDuration: '1.6s',
     animationIterationCount: 'infinite',
   }),
