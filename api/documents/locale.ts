@@ -5,14 +5,19 @@ import type { Words } from '@/api/engine/words';
 /** Dates, numbers and sentences as the firm writes them; times are those of the job's zone. SI throughout. */
 export function createLocale(tag: string, timeZone: string) {
   const locale = known(tag);
-  const number = (value: number, digits: number): string =>
-    new Intl.NumberFormat(locale, {
-      minimumFractionDigits: digits,
-      maximumFractionDigits: digits,
-      signDisplay: 'negative',
-    })
-      .format(value)
-      .replace('-', '−');
+  const formats = new Map<number, Intl.NumberFormat>();
+  const formatOf = (digits: number): Intl.NumberFormat => {
+    const made =
+      formats.get(digits) ??
+      new Intl.NumberFormat(locale, {
+        minimumFractionDigits: digits,
+        maximumFractionDigits: digits,
+        signDisplay: 'negative',
+      });
+    formats.set(digits, made);
+    return made;
+  };
+  const number = (value: number, digits: number): string => formatOf(digits).format(value).replace('-', '−');
   const quantity = (kind: QuantityKind, value: number, digits: number = quantities[kind].SI.digits): string =>
     number(inUnits(kind, value, 'SI'), digits);
   const withUnit = (kind: QuantityKind, value: number, digits?: number): string => {

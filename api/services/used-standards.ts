@@ -68,11 +68,12 @@ function sizeOf({ shape }: Run): UsedStandard[] {
   ];
 }
 
+/** Series whose names are put up: one that a material has and nobody used is not a source. */
 const seriesOf = (judged: Judged): UsedStandard[] =>
-  materialsUsed(judged)
-    .flatMap(({ series }) => series)
-    .flatMap((id) => findSeries(id) ?? [])
-    .map(({ id, title, source, confidence }) => ({
+  materialsUsed(judged).flatMap(({ series }, layer) => {
+    const name = judged.used?.names[layer];
+    const used = series.flatMap((id) => findSeries(id) ?? []).filter(({ names }) => name && names.includes(name));
+    return used.map(({ id, title, source, confidence }): UsedStandard => ({
       id,
       kind: 'made-thickness',
       name: title,
@@ -80,6 +81,7 @@ const seriesOf = (judged: Judged): UsedStandard[] =>
       source,
       confidence,
     }));
+  });
 
 function codeOf(edition: string): UsedStandard[] {
   const code = findCodeEdition(edition);

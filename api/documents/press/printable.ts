@@ -10,6 +10,8 @@ export function createPrintable(document: PDFKit.PDFDocument): Printable {
   const opened: unknown = Reflect.get(document.font('regular'), '_font');
   const known = new Set(openedFont.parse(opened).font.characterSet);
   let replaced = false;
+  const isKnown = (text: string) =>
+    [...text].every((each) => each === '\n' || known.has(each.codePointAt(0) ?? 0)) && text.search(invisible) < 0;
   const sign = (given: string): string => {
     const cluster = given === '\n' ? given : given.replace(invisible, '');
     if (cluster === '\n' || [...cluster].every((each) => known.has(each.codePointAt(0) ?? 0))) return cluster;
@@ -17,7 +19,11 @@ export function createPrintable(document: PDFKit.PDFDocument): Printable {
     return '?';
   };
   return {
-    of: (text) => (plain.test(text) ? text : clusters(spaced(text)).map(sign).join('')),
+    of: (text) => {
+      if (plain.test(text)) return text;
+      const clean = spaced(text);
+      return isKnown(clean) ? clean : clusters(clean).map(sign).join('');
+    },
     replaced: () => replaced,
   };
 }

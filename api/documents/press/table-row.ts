@@ -9,19 +9,32 @@ export type LaidRow = {
   cells: LaidCell[];
   padding: number;
   height: number;
+  keep: boolean;
   destination?: string;
 };
 
 type Grid = { columns: Laid[]; padding: number };
 
-export function layRow(flow: Flow, { kind = 'body', cells, destination }: Row, { columns, padding }: Grid): LaidRow {
+export function layRow(
+  flow: Flow,
+  { kind = 'body', cells, keep, destination }: Row,
+  { columns, padding }: Grid,
+): LaidRow {
   let next = 0;
   const laid = cells.map((cell) => {
     const from = next;
     next += kind === 'heading' ? columns.length : (cell.span ?? 1);
     return layCell(flow, cell, merged(columns.slice(from, next)));
   });
-  return { kind, cells: laid, padding, height: heightOf(laid, padding), destination };
+  const room = kind === 'heading' ? Math.max(padding, 4) : padding;
+  return {
+    kind,
+    cells: laid,
+    padding: room,
+    height: heightOf(laid, room),
+    keep: keep ?? kind === 'heading',
+    destination,
+  };
 }
 
 function merged(columns: Laid[]): Laid {

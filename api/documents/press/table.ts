@@ -12,9 +12,9 @@ export type Cell =
   { pieces: Piece[]; picture?: undefined; span?: number } | { pieces?: undefined; picture: Picture; span?: undefined };
 /** Widths in points; columns without one share what is left by their `share`. */
 export type Column = { title: string; width?: number; share?: number; align?: 'left' | 'right' };
-/** `heading`: stands over the rows below it, across the table; `total`: never parted from the row above it. */
-export type Row = { kind?: 'body' | 'heading' | 'total'; cells: Cell[]; destination?: string };
-export type Table = { columns: Column[]; rows: Row[]; caption: string; bare?: boolean; dense?: boolean };
+/** `heading`: stands over the rows below it, across the table; `total`: never parted from the row above it; `keep`: not from the one below. */
+export type Row = { kind?: 'body' | 'heading' | 'total'; cells: Cell[]; keep?: boolean; destination?: string };
+export type Table = { columns: Column[]; rows: Row[]; caption: string; bare?: boolean; padding?: number };
 export type Laid = Column & { x: number; inner: number };
 
 export const text = (words: string, style: Style = styles.cell): Cell => ({ pieces: [{ text: words, style }] });
@@ -32,7 +32,7 @@ export const piece = (words: string, style: Style = styles.cell, goTo?: string):
 /** Prints a table: its heads again on every page, rows whole, headings and totals beside their rows. */
 export function printTable(flow: Flow, table: Table): void {
   const columns = layColumns(table.columns);
-  const rows = table.rows.map((row) => layRow(flow, row, { columns, padding: table.dense ? 2.5 : 5 }));
+  const rows = table.rows.map((row) => layRow(flow, row, { columns, padding: table.padding ?? 5 }));
   const element = flow.document.struct('Table', { title: table.caption });
   flow.part.add(element);
   const head = () => {
@@ -75,7 +75,7 @@ function together(rows: LaidRow[], from: number): number {
   for (let index = from; index < rows.length; index += 1) {
     height += rows[index]!.height;
     const next = rows[index + 1];
-    if (rows[index]!.kind !== 'heading' && next?.kind !== 'total') break;
+    if (!rows[index]!.keep && next?.kind !== 'total') break;
   }
   return height;
 }

@@ -9,7 +9,7 @@ type Basis = Pick<Sheet, 'flow' | 'snapshot' | 'locale'>;
 /** What the takeoff stands on: drawings and specification with their revisions, addenda, code, method. */
 export function printBasis(basis: Basis): void {
   const { flow, snapshot } = basis;
-  openPart(flow, 'What this is based on', 200);
+  openPart(flow, 'What this is based on', 132);
   printTerms(basis);
   subheading(flow, 'Drawings');
   if (snapshot.drawings.length > 0) printDrawings(basis);
@@ -21,14 +21,14 @@ export function printBasis(basis: Basis): void {
 }
 
 function printTerms({ flow, snapshot, locale }: Basis): void {
-  const { specification, codeEdition, climateZone, altitude, surfaceMethod } = snapshot.job;
+  const { specification, climateZone, altitude, surfaceMethod } = snapshot.job;
   const dated = specification.date && locale.date(specification.date);
   const title = [specification.number, specification.title, specification.revision, dated].filter(Boolean).join(', ');
   const rows: Row[] = [
     fact('Specification', title || 'none was handed down'),
     fact(
       'Energy code',
-      `${codeEdition}, climate zone ${climateZone}. “Meets the table entered” is not a statement of compliance.`,
+      `${codeTitle(snapshot)}, climate zone ${climateZone}. “Meets the table entered” is not a statement of compliance.`,
     ),
     fact(
       'Surface coefficients',
@@ -41,6 +41,10 @@ function printTerms({ flow, snapshot, locale }: Basis): void {
   ];
   printTable(flow, { caption: 'Basis', bare: true, columns: [{ title: '', width: 104 }, { title: '' }], rows });
 }
+
+/** The edition by its name, as the standards used have it. */
+const codeTitle = ({ standards, job }: Basis['snapshot']) =>
+  standards.find(({ kind, id }) => kind === 'code' && id.startsWith(job.codeEdition))?.name ?? job.codeEdition;
 
 const fact = (name: string, words: string): Row => ({ cells: [text(name, styles.cellStrong), text(words)] });
 

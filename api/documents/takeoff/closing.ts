@@ -6,13 +6,27 @@ import { piece, printTable, stack, text, type Row } from '@/api/documents/press/
 import type { Sheet } from './sheet';
 
 const kindWords: Record<UsedStandard['kind'], string> = {
-  pipe: 'Pipe size',
-  material: 'Material',
-  finish: 'Finish',
+  pipe: 'Pipe and tube sizes',
+  material: 'Materials',
+  finish: 'Finishes',
   code: 'Energy code',
   'made-thickness': 'Made thicknesses',
-  safety: 'Touch threshold',
+  safety: 'Touch',
 };
+
+const kinds = ['code', 'material', 'finish', 'pipe', 'made-thickness', 'safety'] as const;
+
+function rowsOf(kind: UsedStandard['kind'], standards: UsedStandard[]): Row[] {
+  const used = standards.filter((row) => row.kind === kind);
+  if (used.length === 0) return [];
+  const rows = used.map(({ name, detail, source, confidence }): Row => ({
+    cells: [
+      stack(piece(name, styles.cell), detail ? piece(detail, styles.note) : null),
+      stack(piece(source, styles.note), piece(`Confidence: ${confidence}`, styles.noteStrong)),
+    ],
+  }));
+  return [{ kind: 'heading', cells: [text(kindWords[kind], styles.cellStrong)] }, ...rows];
+}
 
 /** Every row of the library that a number rests on, with its source and how sure it is. */
 export function printStandards(sheet: Sheet): void {
@@ -20,21 +34,9 @@ export function printStandards(sheet: Sheet): void {
   openPart(flow, 'Standards and data used', 120);
   if (snapshot.standards.length === 0) paragraph(flow, 'No row of the library was used.', { style: styles.body });
   else {
-    const rows = snapshot.standards.map(({ kind, name, detail, source, confidence }): Row => ({
-      cells: [
-        text(kindWords[kind], styles.cellSoft),
-        stack(piece(name, styles.cellStrong), detail ? piece(detail, styles.cellSoft) : null),
-        text(source, styles.cellSoft),
-        text(confidence, styles.cellSoft),
-      ],
-    }));
-    const columns = [
-      { title: 'Kind', width: 66 },
-      { title: 'Row, and what it says', share: 1.2 },
-      { title: 'Source', share: 1.2 },
-      { title: 'Confidence', width: 96 },
-    ];
-    printTable(flow, { caption: 'Standards and data used', columns, rows });
+    const rows = kinds.flatMap((kind) => rowsOf(kind, snapshot.standards));
+    const columns = [{ title: 'Row, and what it says', share: 0.75 }, { title: 'Source, and how sure it is' }];
+    printTable(flow, { caption: 'Standards and data used', padding: 3, columns, rows });
   }
   printColophon(sheet);
   closePart(flow);

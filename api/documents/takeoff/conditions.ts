@@ -79,7 +79,7 @@ function printPlaces({ flow, snapshot, locale }: Sheet): void {
     headingOf(place, locale),
     ...conditionSets.map((set) => conditionRow(place, set, locale)),
   ]);
-  printTable(flow, { caption: 'Conditions by place', dense: true, columns, rows });
+  printTable(flow, { caption: 'Conditions by place', padding: 2.5, columns, rows });
 }
 
 function headingOf(place: Place, locale: Sheet['locale']): Row {
@@ -90,7 +90,7 @@ function headingOf(place: Place, locale: Sheet['locale']): Row {
   const kind = [
     place.outdoor ? 'outdoors' : '',
     place.plenum ? 'return-air plenum' : '',
-    place.ductLocation ? `ducts: ${place.ductLocation}` : '',
+    place.ductLocation ? `ducts: ${place.ductLocation.replaceAll('_', ' ')}` : '',
   ];
   const words = [`${reachWords[place.reach]}, ${limit}${source}`, ...kind].filter((part) => part !== '').join(' · ');
   return {
@@ -102,6 +102,7 @@ function headingOf(place: Place, locale: Sheet['locale']): Row {
 function conditionRow({ conditions }: Place, set: ConditionSet, locale: Sheet['locale']): Row {
   const { air, humidity, wind, source } = conditions[set];
   return {
+    keep: set !== 'mean',
     cells: [
       text(setWords[set]),
       text(locale.quantity('temperature', air.value)),

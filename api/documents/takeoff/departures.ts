@@ -6,6 +6,7 @@ import { styles } from '@/api/documents/press/ink';
 import { piece, printTable, stack, text, type Row } from '@/api/documents/press/table';
 
 import { numberRanges } from './number-ranges';
+import { shortName } from './schedule-words';
 import type { Sheet } from './sheet';
 
 /** Runs that depart from the specification, each with the reason that was given. */
@@ -39,13 +40,14 @@ export function printOverrides(sheet: Sheet): void {
 function departureOf(sheet: Sheet, run: Run) {
   const assembly = sheet.snapshot.judged.find(({ runId }) => runId === run.id)?.assembly;
   const layers = assembly?.layers.map(
-    ({ materialName, thickness }) => `${materialName}${thickness ? ` ${thicknessText([thickness], 'SI')}` : ''}`,
+    ({ materialName, thickness }) =>
+      `${shortName(materialName)}${thickness ? ` ${thicknessText([thickness], 'SI')}` : ''}`,
   );
   return {
     service: serviceOf(sheet, run),
     size: sizeOf(sheet, run),
     layers: layers?.join(' + ') ?? '',
-    finish: assembly?.finishName ?? '',
+    finish: shortName(assembly?.finishName ?? ''),
     reasons: [run.override?.reason ?? '', ...otherChanges(run, sheet.locale)],
   };
 }

@@ -12,6 +12,7 @@ import {
   type PrintedLine,
   type Sums,
 } from './printed-quantities';
+import { shortName } from './schedule-words';
 import type { Sheet } from './sheet';
 
 const kindWords = { pipe: 'Pipes and tubes', duct: 'Ducts', equipment: 'Equipment' } as const;
@@ -42,15 +43,15 @@ function printKind(sheet: Sheet, kind: PrintedKind): void {
     ...(lines.length > 1 ? [sumRow(printing, `${service}, sum`, sums)] : []),
   ]);
   const total = sumRow(printing, `${title}, total`, kind.sums);
-  printTable(flow, { caption: title, columns: columnsFor(printing), rows: [...rows, total] });
+  printTable(flow, { caption: title, padding: 3.5, columns: columnsFor(printing), rows: [...rows, total] });
   if (kind.byThickness.length > 1) printThicknesses(printing);
 }
 
 /** The amounts that a kind has, in the order of its columns. */
 function measures({ sheet: { locale }, kind: { sums } }: Printing) {
   const all = [
-    { has: sums.length !== null, title: 'length m', width: 50, show: (of: Sums) => shown(of.length, lengthDigits) },
-    { has: sums.area !== null, title: 'surface m²', width: 54, show: (of: Sums) => shown(of.area, areaDigits) },
+    { has: sums.length !== null, title: 'length m', width: 44, show: (of: Sums) => shown(of.length, lengthDigits) },
+    { has: sums.area !== null, title: 'surface m²', width: 50, show: (of: Sums) => shown(of.area, areaDigits) },
     { has: sums.count !== null, title: 'pieces', width: 38, show: (of: Sums) => shown(of.count, 0) },
   ];
   const shown = (value: number | null, digits: number) => (value === null ? '' : locale.number(value, digits));
@@ -59,11 +60,11 @@ function measures({ sheet: { locale }, kind: { sums } }: Printing) {
 
 const right = { align: 'right' as const };
 const columnsFor = (printing: Printing): Column[] => [
-  { title: 'Size', share: 1.1 },
-  { title: 'Material and finish', share: 1.7 },
-  { title: 'thickness mm', width: 60, ...right },
+  { title: 'Size', share: printing.kind.kind === 'equipment' ? 1.9 : 0.95 },
+  { title: 'Material and finish', share: 1.9 },
+  { title: 'mm', width: 38, ...right },
   ...measures(printing).map(({ title, width }) => ({ title, width, ...right })),
-  { title: 'Runs and fittings', share: 1.6 },
+  { title: 'Runs and fittings', share: 1.9 },
 ];
 
 function lineRow(printing: Printing, printed: PrintedLine): Row {
@@ -72,7 +73,7 @@ function lineRow(printing: Printing, printed: PrintedLine): Row {
   return {
     cells: [
       text(line.size),
-      stack(piece(line.material), piece(line.finish, styles.cellSoft)),
+      stack(piece(shortName(line.material)), piece(shortName(line.finish), styles.cellSoft)),
       text(thicknessLabel(line), styles.cellStrong),
       ...measures(printing).map(({ show }) => text(show(printed))),
       stack(
@@ -94,7 +95,7 @@ function printThicknesses(printing: Printing): void {
   subheading(sheet.flow, `${kindWords[kind.kind]} by material and thickness`, { tag: 'H4' });
   const rows: Row[] = kind.byThickness.map(({ material, thickness, sums }) => ({
     cells: [
-      across(material, 2, styles.cell),
+      across(shortName(material), 2, styles.cell),
       text(thickness, styles.cellStrong),
       ...measures(printing).map(({ show }) => text(show(sums))),
       text(''),
@@ -103,7 +104,7 @@ function printThicknesses(printing: Printing): void {
   const titles: Record<string, string> = { Size: 'Material', 'Material and finish': '', 'Runs and fittings': '' };
   const columns = columnsFor(printing).map((column) => ({ ...column, title: titles[column.title] ?? column.title }));
   const total = sumRow(printing, 'Total', kind.sums);
-  printTable(sheet.flow, { caption: 'By material and thickness', dense: true, columns, rows: [...rows, total] });
+  printTable(sheet.flow, { caption: 'By material and thickness', padding: 2.5, columns, rows: [...rows, total] });
 }
 
 function printFittings({ flow, snapshot, locale }: Sheet): void {

@@ -37,3 +37,6 @@ export function sourceWords({
     return ['chosen', specificationLabel && `instead of ${specificationLabel}`].filter(Boolean).join(' ');
   return 'proposed here';
 }
+
+/** A material or finish without what its standard adds in brackets; the list of standards has the whole name. */
+export const shortName = (name: string): string => name.replace(/\s*\([^()]*\)/g, '').trim() || name;

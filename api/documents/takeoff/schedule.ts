@@ -5,8 +5,8 @@ import { piece, printTable, stack, text, type Cell, type Piece, type Row } from 
 
 import { destinationOf, numbersFor } from './clarifications';
 import { numberRanges } from './number-ranges';
-import { inchesOf, retarderWords, sizesAndThickness, sourceWords, thicknessOf } from './schedule-words';
-import { drawSection, fitting } from './section-picture';
+import { inchesOf, retarderWords, shortName, sizesAndThickness, sourceWords, thicknessOf } from './schedule-words';
+import { drawSection } from './section-picture';
 import type { Sheet } from './sheet';
 
 /** Thickness by service, size and place, each with its source and what decides it. */
@@ -31,11 +31,11 @@ export function printSchedule(sheet: Sheet): void {
 const glyph = 36;
 const columns = [
   { title: '', width: glyph },
-  { title: 'Service and size', share: 1.1 },
-  { title: 'Place and runs', share: 1 },
-  { title: 'Material and finish', share: 1.1 },
-  { title: 'mm', width: 54, align: 'right' as const },
-  { title: 'From, and what decides', share: 1.2 },
+  { title: 'Service and size', share: 1.05 },
+  { title: 'Place and runs', share: 0.9 },
+  { title: 'Material and finish', share: 1.25 },
+  { title: 'mm', width: 60, align: 'right' as const },
+  { title: 'From, and what decides', share: 1.25 },
 ];
 
 function scheduleRow(sheet: Sheet, row: ScheduleRow): Row {
@@ -60,18 +60,16 @@ function scheduleRow(sheet: Sheet, row: ScheduleRow): Row {
 function picture({ flow }: Sheet, row: ScheduleRow): Cell {
   const { section } = row;
   if (!section) return text('');
-  const half = glyph / 2;
-  const draw = (x: number, y: number) =>
-    drawSection(flow.document, section, { x: x + half, y: y + half, scale: fitting(section, glyph - 2) });
+  const draw = (x: number, y: number) => drawSection(flow.document, section, { x, y, size: glyph });
   return { picture: { alt: `Section: ${sizesAndThickness(row).replace('\n', ', ')}`, height: glyph, draw } };
 }
 
 function materials({ layers, finish, vapourRetarder }: ScheduleRow): Cell {
-  const names = [...new Set(layers.map(({ material }) => material))];
+  const names = [...new Set(layers.map(({ material }) => shortName(material)))];
   const words = retarderWords[vapourRetarder];
   return stack(
     ...names.map((name) => piece(layers.length > 1 && names.length === 1 ? `${name}, ${layers.length} layers` : name)),
-    piece(finish, styles.cellSoft),
+    piece(shortName(finish), styles.cellSoft),
     words ? piece(words, styles.cellSoft) : null,
   );
 }

@@ -1,9 +1,10 @@
 import { sizesAndThickness } from './schedule-words';
+import { extentOf } from '@/api/geometry/section';
 import type { DrawnSection, ScheduleRow } from '@/api/contracts/schedule';
 import { gap, hairline, room } from '@/api/documents/press/flow';
 import { body, ink, styles } from '@/api/documents/press/ink';
 
-import { drawSection, extentOf } from './section-picture';
+import { measuredAt, put } from './section-picture';
 import type { Sheet } from './sheet';
 
 const most = 7;
@@ -15,12 +16,12 @@ export function printSectionLine(sheet: Sheet): void {
   const drawn = chosen(snapshot.schedule.rows);
   if (drawn.length < 2) return;
   gap(flow, 16);
-  room(flow, height + 44);
+  room(flow, height + 52);
   const scale = scaleFor(drawn.map(({ section }) => section));
   const base = flow.y + height;
   const alt = `Sections at one scale: ${drawn.map(({ row }) => sizesAndThickness(row)).join('; ')}`;
   flow.part.add(flow.document.struct('Figure', { alt }, () => drawAll(sheet, drawn, { base, scale })));
-  flow.y = base + 34;
+  flow.y = base + 42;
 }
 
 type Drawn = { row: ScheduleRow; section: DrawnSection };
@@ -47,27 +48,28 @@ function scaleFor(sections: DrawnSection[]): number {
   return Math.min((body.width - space * (sections.length - 1)) / across, height / Math.max(...widths));
 }
 
-function drawAll({ flow }: Sheet, drawn: Drawn[], { base, scale }: { base: number; scale: number }): void {
-  const widths = drawn.map(({ section }) => Math.max(extentOf(section).width * scale, 44));
+type Standing = { base: number; scale: number };
+function drawAll({ flow }: Sheet, drawn: Drawn[], { base, scale }: Standing): void {
+  const measured = drawn.map((one) => ({ ...one, ...measuredAt(one.section, scale) }));
+  const widths = measured.map(({ width }) => Math.max(width, 50));
   const between = (body.width - widths.reduce((sum, width) => sum + width, 0)) / (drawn.length - 1);
   let x: number = body.left;
-  drawn.forEach(({ row, section }, index) => {
-    const centre = x + widths[index]! / 2;
-    const radius = (extentOf(section).height * scale) / 2;
-    drawSection(flow.document, section, { x: centre, y: base - radius, scale });
-    label(flow, sizesAndThickness(row), { centre, y: base + 5, width: widths[index]! + Math.min(between, 24) });
-    x += widths[index]! + between;
+  measured.forEach(({ row, drawing, left, top, width, height: tall }, index) => {
+    const room = widths[index]!;
+    put(flow.document, drawing, { x: x + (room - width) / 2 - left, y: base - tall - top });
+    label(flow, sizesAndThickness(row), { centre: x + room / 2, y: base + 5, width: room + Math.min(between - 4, 24) });
+    x += room + between;
   });
-  artifactLine(flow, base);
+  hairline(flow, base, { colour: ink.text, width: 0.8 });
 }
 
-const artifactLine = (flow: Sheet['flow'], y: number) => hairline(flow, y, { colour: ink.text, width: 0.8 });
-
 type Label = { centre: number; y: number; width: number };
+/** Size over thickness, both centred; a long size takes two lines. */
 function label(flow: Sheet['flow'], words: string, { centre, y, width }: Label): void {
-  const lines = words.split('\n').flatMap((part) => flow.wrap.lines(part, styles.note, width));
-  lines.slice(0, 2).forEach((line, index) => {
-    const style = index === 0 ? styles.noteStrong : styles.note;
+  const [size = '', thickness = ''] = words.split('\n');
+  const lines = flow.wrap.lines(size, styles.noteStrong, width).slice(0, 2);
+  [...lines, thickness].forEach((line, index) => {
+    const style = index < lines.length ? styles.noteStrong : styles.note;
     flow.line(line, { x: centre - flow.wrap.width(line, style) / 2, y: y + index * style.leading, style });
   });
 }
