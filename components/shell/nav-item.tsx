@@ -8,13 +8,14 @@ import { Text } from '@/components/ui/text';
 
 export type Place = { label: string; href: Href; current: boolean; count?: number };
 
+// A link that hands its place to its child spreads the child's style, which must be one object.
 /** A place on the rail. */
 export function RailItem({ label, href, current, count }: Place) {
   const theme = useTheme();
   const colours = current ? { backgroundColor: theme.sheet, borderLeftColor: theme.oxide } : null;
   return (
     <Link href={href} asChild aria-current={current ? 'page' : undefined} aria-label={nameOf(label, count)}>
-      <View style={[styles.rail, colours]}>
+      <View style={StyleSheet.flatten([styles.rail, colours])}>
         <Text weight={current ? 'strong' : 'regular'}>{label}</Text>
         {count ? (
           <Text tone="fail" numeric>
@@ -31,7 +32,7 @@ export function BarItem({ label, href, current, count }: Place) {
   const theme = useTheme();
   return (
     <Link href={href} asChild aria-current={current ? 'page' : undefined} aria-label={nameOf(label, count)}>
-      <View style={[barItem.item, { borderTopColor: current ? theme.oxide : 'transparent' }]}>
+      <View style={StyleSheet.flatten([barItem.item, { borderTopColor: current ? theme.oxide : 'transparent' }])}>
         <Text size="small" weight={current ? 'strong' : 'regular'} tone={current ? 'ink' : 'inkSoft'} noWrap>
           {label}
         </Text>
