@@ -1,7 +1,7 @@
 import { inchLabel, millimetreLabel, type ThicknessName } from '@/api/engine/standards/thickness-name';
 import type { Words } from '@/api/engine/words';
 
-import { showWithUnit, type UnitSystem } from './quantities';
+import { inUnits, showWithUnit, type UnitSystem } from './quantities';
 
 export type { Words };
 
@@ -21,5 +21,13 @@ export function thicknessText(names: readonly ThicknessName[], units: UnitSystem
 function partText(part: Words[number], units: UnitSystem): string {
   if (typeof part === 'string') return part;
   if ('thickness' in part) return thicknessText(part.thickness, units);
-  return showWithUnit(part.kind, part.value, { units, digits: part.digits });
+  return showWithUnit(part.kind, part.value, { units, digits: digitsOf(part, units) });
+}
+
+type Amount = Extract<Words[number], { kind: string }>;
+
+/** A limit of 43 °C is said whole, but as 109.4 °F: what is whole in one system need not be in the other. */
+function digitsOf({ kind, value, digits }: Amount, units: UnitSystem): number | undefined {
+  const shown = inUnits(kind, value, units);
+  return digits === 0 && Math.abs(shown - Math.round(shown)) > 1e-6 ? undefined : digits;
 }

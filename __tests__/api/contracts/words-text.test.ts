@@ -16,3 +16,10 @@ it('names layers from the inside out and keeps metric names metric', () => {
   expect(thicknessText(['in:2.5', 'in:2'], 'IP')).toBe('2-1/2 + 2 in');
   expect(thicknessText(['mm:50', 'in:1'], 'IP')).toBe('50 mm + 1 in');
 });
+
+it('says a whole limit whole, but only where it is whole in the reader’s units', () => {
+  const limit = (value: number) => [{ kind: 'temperature' as const, value, digits: 0 }];
+  expect(wordsText(limit(60), 'SI')).toBe('60 °C');
+  expect(wordsText(limit(60), 'IP')).toBe('140 °F');
+  expect(wordsText(limit(43), 'IP')).toBe('109.4 °F');
+});
