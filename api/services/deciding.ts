@@ -33,7 +33,9 @@ const verdictWords = ({ verdict }: Flag) => (verdict?.verdict === 'cannot-tell' 
 
 function remedy({ verdict, meetsBy }: Flag): Words {
   if (verdict?.verdict === 'cannot-tell') return ['.'];
-  return meetsBy ? [': ', { thickness: [meetsBy.thickness] }, ' meets it.'] : ['; no made thickness meets it.'];
+  return meetsBy
+    ? [': ', { thickness: [meetsBy.thickness] }, ' meets it.']
+    : ['; no made thickness with this finish meets it.'];
 }
 
 /** All limits are met: what governs, and where less would do. */

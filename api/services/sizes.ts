@@ -18,7 +18,8 @@ export function sizeWords({ shape, title }: Run): string {
   const size = sizeText(shape, 'SI');
   if (shape.kind === 'round-duct' || shape.kind === 'rectangular-duct') return size;
   if (shape.kind === 'piece') return title || kindText(shape);
-  return title ? `${title}, ${size}` : size;
+  const each = shape.count > 1 ? `${size} each` : size;
+  return title ? `${title}, ${each}` : each;
 }
 
 function nominalWords(shape: Shape): string {
