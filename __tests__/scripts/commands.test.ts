@@ -86,13 +86,14 @@ describe('the server', () => {
 });
 
 describe('the server, asked to stop', () => {
-  const environment = { SESSION_SECRET: 'sixteen letters!', LOG_LEVEL: 'silent', NODE_ENV: 'production' };
+  const environment = { SESSION_SECRET: 'sixteen letters!', LOG_LEVEL: 'silent' };
 
   /** A server on the tests' database, ready to answer. */
   async function serving(port: number) {
+    const env: NodeJS.ProcessEnv = { ...process.env, ...environment, NODE_ENV: 'production', PORT: String(port) };
     const child = spawn(process.execPath, ['--import', 'tsx', 'api/server.ts'], {
       cwd: root,
-      env: { ...process.env, ...environment, PORT: String(port) },
+      env,
       stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
     });
     const ended = new Promise<number | null>((resolve) => child.once('exit', resolve));
