@@ -18,7 +18,7 @@ type RowFormOptions<Input extends FieldValues, Output extends Input, Row extends
   /** null: a new one */
   row: Row | null;
   /** what the fields begin with */
-  initial: DefaultValues<Input>;
+  initial: DefaultValues<NoInfer<Input>>;
   actions: { create: (input: Output) => Promise<Row>; change: (seen: Seen, input: Output) => Promise<Row> };
   onSaved: (row: Row) => void;
 };

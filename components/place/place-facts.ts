@@ -9,15 +9,15 @@ export type PlaceFactsOptions = { units: UnitSystem; ductLocations: readonly { i
 export function placeFacts(place: PlaceInput, { units, ductLocations }: PlaceFactsOptions) {
   const { name, touchLimitSource, ductLocation, note, conditions } = place;
   return [
-    { label: 'Name', text: name },
-    { label: 'Where', text: situationText(place) },
-    { label: 'Who can reach it', text: touchText(place, units) },
-    { label: 'Who says so', text: touchLimitSource },
-    { label: 'Ducts here', text: ductLocations.find(({ id }) => id === ductLocation)?.words ?? ductLocation ?? '' },
+    { term: 'Name', value: name },
+    { term: 'Where', value: situationText(place) },
+    { term: 'Who can reach it', value: touchText(place, units) },
+    { term: 'Who says so', value: touchLimitSource },
+    { term: 'Ducts here', value: ductLocations.find(({ id }) => id === ductLocation)?.words ?? ductLocation ?? '' },
     ...conditionSetWords.map((set) => ({
-      label: `${set.title} air`,
-      text: `${airText(conditions[set.name], units)} · ${conditions[set.name].source}`,
+      term: `${set.title} air`,
+      value: `${airText(conditions[set.name], units)} · ${conditions[set.name].source}`,
     })),
-    { label: 'Note', text: note },
+    { term: 'Note', value: note },
   ];
 }

@@ -12,17 +12,17 @@ export type ServiceFactsOptions = { units: UnitSystem; places: readonly { id: st
 export function serviceFacts(service: ServiceInput, { units, places }: ServiceFactsOptions) {
   const { name, fluid, states, hours, codeExempt, note } = service;
   const temperatures = states.map((state) => ({
-    label: states.length > 1 ? `Temperatures when ${state.nature}` : 'Temperatures',
-    text: temperaturesText(state, units),
+    term: states.length > 1 ? `Temperatures when ${state.nature}` : 'Temperatures',
+    value: temperaturesText(state, units),
   }));
   return [
-    { label: 'Name', text: name },
-    { label: 'Fluid', text: `${fluid}, ${natureText(states)}` },
+    { term: 'Name', value: name },
+    { term: 'Fluid', value: `${fluid}, ${natureText(states)}` },
     ...temperatures,
-    { label: 'Hours a year', text: showWithUnit('hours', hours.value, { units }) },
-    { label: 'Limits', text: limitsText(service, places, units) },
-    { label: 'Outside the energy code because', text: codeExempt },
-    { label: 'Note', text: note },
+    { term: 'Hours a year', value: showWithUnit('hours', hours.value, { units }) },
+    { term: 'Limits', value: limitsText(service, places, units) },
+    { term: 'Outside the energy code because', value: codeExempt },
+    { term: 'Note', value: note },
   ];
 }
 
