@@ -11,16 +11,15 @@ export type Balance = { flow: number; difference: number; iterations: number; is
 type Trial = { flow: number; difference: number; residual: number };
 type Bracket = { low: number; high: number };
 
-const tolerance = 1e-10;
+const tolerance = 5e-10;
 const collapsed = 4e-15;
 const mostIterations = 200;
 const usualCoefficient = 8; // W/(m²·K), only to start from
-const usualGrowth = 1.15; // how much faster than the difference the heat given off grows, only to start from
 
 /**
  * The heat flow for which as much is conducted through the wall as its surface gives off. One unknown: a flow fixes
  * every interface in closed form and so the surface's temperature. Secant steps inside a bracket that bisection keeps
- * shrinking, until conducted and given off agree to 1e-10 of the larger. A correlation that jumps can leave no such
+ * shrinking, until conducted and given off agree to 5e-10 of the larger. A correlation that jumps can leave no such
  * flow: then the bracket closes on the jump, where the flow is what is conducted.
  *
  * @param wall - at least one layer
@@ -66,21 +65,16 @@ function widest(wall: Wall, { pipe, lowest, highest, air }: Bounds): Bracket {
 
 function startingFlow(wall: Wall, exchange: Exchange, { pipe, air }: Bounds): number {
   const resistance = roughResistance(wall, air + pipe / 2);
-  const sink = exchange.offset / 2;
-  const rough = (pipe - sink) / (1 + resistance * usualCoefficient * wall.area);
-  if (exchange.offset !== 0 || rough === 0) return rough * usualCoefficient * wall.area;
-  const coefficient = exchange.flux(rough) / rough;
-  return pipe / (resistance + 1 / (coefficient * wall.area));
+  return (pipe - exchange.offset / 2) / (resistance + 1 / (usualCoefficient * wall.area));
 }
 
-/** Newton's step with a guessed slope at first, then the secant through the last two trials. */
+/** The secant through the last two trials; at first the flow through the two resistances that the first trial showed. */
 function nextFlow(trial: Trial, last: Trial | undefined, { pipe }: Bounds): number {
   const { flow, residual, difference } = trial;
   if (last && Number.isFinite(last.residual)) {
     return flow - (residual * (flow - last.flow)) / (residual - last.residual);
   }
-  const given = flow - residual;
-  return flow - residual / (1 + (usualGrowth * given * (pipe - difference)) / (difference * flow));
+  return pipe / ((pipe - difference) / flow + difference / (flow - residual));
 }
 
 const within = (bracket: Bracket, flow: number): number =>
