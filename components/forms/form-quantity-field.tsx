@@ -14,11 +14,11 @@ import { TextField, type TextFieldProps } from '@/components/ui/text-field';
 import { useBound, type Bound } from './bound';
 import { useFieldUnits } from './field-units';
 
-type Own = Pick<TextFieldProps, 'label' | 'hint' | 'optional' | 'disabled'>;
+type Own = Pick<TextFieldProps, 'label' | 'hideLabel' | 'hint' | 'optional' | 'disabled'>;
 type FormQuantityFieldProps<Input extends FieldValues, Output> = Bound<Input, Output> &
   Own & {
     kind: QuantityKind;
-    /** what an empty field means to the contract; a required one refuses either */
+    /** the field may stay empty, which the form holds as `null`; without it the contract wants a number */
     blank?: null;
   };
 
@@ -36,10 +36,10 @@ export function FormQuantityField<Input extends FieldValues, Output>(props: Form
   const [draft, setDraft] = useState<Draft>();
   const [typing, setTyping] = useState(false);
   // a draft counts as long as the form was not given another value since
-  const live = draft && draft.value === value ? draft : undefined;
+  const live = draft && isSame(draft.value, value) ? draft : undefined;
   const quantity = quantityOf(value);
   const type = (text: string) => {
-    const next = read({ kind, text, units, blank });
+    const next = read({ kind, text, units });
     setTyping(true);
     setDraft(next);
     change(next.value);
@@ -54,6 +54,7 @@ export function FormQuantityField<Input extends FieldValues, Output>(props: Form
       {...own}
       ref={ref}
       name={name}
+      required={blank !== null}
       numeric
       inputMode="text"
       autoComplete="off"
@@ -67,10 +68,13 @@ export function FormQuantityField<Input extends FieldValues, Output>(props: Form
   );
 }
 
-type Typed = { kind: QuantityKind; text: string; units: UnitSystem; blank?: null };
+// the form keeps a copy of what it is given
+const isSame = (one: unknown, other: unknown) => JSON.stringify(one) === JSON.stringify(other);
 
-function read({ kind, text, units, blank }: Typed): Draft {
-  if (text.trim() === '') return { text, value: blank };
+type Typed = { kind: QuantityKind; text: string; units: UnitSystem };
+
+function read({ kind, text, units }: Typed): Draft {
+  if (text.trim() === '') return { text, value: null };
   const reading = readQuantity(kind, text, units);
   if ('quantity' in reading) return { text, value: reading.quantity };
   // kept in the form as what no contract takes, so that it cannot be saved by mistake

@@ -4,7 +4,7 @@ import { Select, type SelectProps } from '@/components/ui/select';
 
 import { useBound, type Bound } from './bound';
 
-type Own = Pick<SelectProps, 'label' | 'hint' | 'options' | 'placeholder' | 'optional' | 'disabled'>;
+type Own = Pick<SelectProps, 'label' | 'hideLabel' | 'hint' | 'options' | 'placeholder' | 'optional' | 'disabled'>;
 type FormSelectProps<Input extends FieldValues, Output> = Bound<Input, Output> &
   Own & {
     /** what choosing nothing is called, where that is a choice; the form then holds `null` */

@@ -1,8 +1,8 @@
-import type { FieldPath, FieldValues, UseFormReturn } from 'react-hook-form';
+import type { FieldPath, FieldValues, UseFormSetError } from 'react-hook-form';
 
 import { problemSchema, type Problem } from '@/api/contracts/problem';
 
-type Target<Input extends FieldValues> = Pick<UseFormReturn<Input>, 'setError' | 'getValues'>;
+type Target<Input extends FieldValues> = { setError: UseFormSetError<Input>; getValues: () => unknown };
 
 /** Puts a failed request's messages beside their fields and the rest at the head of the form. What is no such failure is thrown on. */
 export function showProblem<Input extends FieldValues>(error: unknown, { setError, getValues }: Target<Input>): void {

@@ -1,5 +1,7 @@
 import type { Href } from 'expo-router';
 
+import type { Place } from './nav-item';
+
 /** One place of a job: under its address all that belongs to it. */
 type JobPlace = { label: string; href: Href & string; counted?: boolean };
 
@@ -14,7 +16,7 @@ const placesOf = (job: string): JobPlace[] => [
 const isAt = (pathname: string, href: string) => pathname === href || pathname.startsWith(`${href}/`);
 
 /** The places of a job. What is in none of the others (its places, services, specification) belongs to the overview. */
-export function jobPlaces({ job, pathname, flags }: { job: string; pathname: string; flags?: number }) {
+export function jobPlaces({ job, pathname, flags }: { job: string; pathname: string; flags?: number }): Place[] {
   const [overview, ...others] = placesOf(job);
   const inOther = others.some(({ href }) => isAt(pathname, href));
   return [overview, ...others]
@@ -28,9 +30,9 @@ export function jobPlaces({ job, pathname, flags }: { job: string; pathname: str
 }
 
 /** The places outside of any job. */
-export const generalPlaces = ({ pathname, inJob }: { pathname: string; inJob: boolean }) => [
-  { label: inJob ? 'All jobs' : 'Jobs', href: '/jobs' as const, current: !inJob && isAt(pathname, '/jobs') },
-  { label: 'Library', href: '/library' as const, current: isAt(pathname, '/library') },
+export const generalPlaces = ({ pathname, inJob }: { pathname: string; inJob: boolean }): Place[] => [
+  { label: inJob ? 'All jobs' : 'Jobs', href: '/jobs', current: !inJob && isAt(pathname, '/jobs') },
+  { label: 'Library', href: '/library', current: isAt(pathname, '/library') },
 ];
 
 /** A detail below a place has its own way back and its own foot: there a phone needs no bar. */

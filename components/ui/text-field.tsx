@@ -30,6 +30,8 @@ export type TextFieldProps = FieldWords & {
   /** figures, set to the right */
   numeric?: boolean;
   optional?: boolean;
+  /** said to those who do not see the form; what is optional says so in its label */
+  required?: boolean;
   disabled?: boolean;
   maxLength?: number;
 };
@@ -54,13 +56,26 @@ export function TextField({ label, hideLabel, hint, problem, optional, unit, ...
 
 type BoxProps = Omit<TextFieldProps, 'label' | 'optional'> & { id: string };
 
-function Box({ id, hint, problem, unit, kind = 'text', multiline, numeric, ref, onChange, ...rest }: BoxProps) {
+function Box({
+  id,
+  hint,
+  problem,
+  unit,
+  kind = 'text',
+  multiline,
+  numeric,
+  required,
+  ref,
+  onChange,
+  ...rest
+}: BoxProps) {
   const theme = useTheme();
   const words = described(id, { hint, problem });
   const shared = {
     ...rest,
     ...words,
     id,
+    'aria-required': required,
     // the unit is read after the label, so that it is known before the number is typed
     'aria-describedby': [unit && `${id}-unit`, words['aria-describedby']].filter(Boolean).join(' ') || undefined,
     onChange: (event: { target: Control }) => onChange(event.target.value),
