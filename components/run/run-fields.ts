@@ -11,6 +11,8 @@ export type RunColumn = {
   width: number;
   /** takes what is left */
   grow?: boolean;
+  /** stays when the form stands beside the table */
+  always?: boolean;
   numeric?: boolean;
   unit?: QuantityKind;
   text: (row: RunRow, units: UnitSystem) => string;
@@ -45,14 +47,15 @@ export const runFields: readonly RunField[] = [
   {
     key: 'number',
     label: 'Run',
-    column: { width: 64, text: ({ run }) => run.number, sort: ({ run }) => run.number },
+    column: { width: 52, always: true, text: ({ run }) => run.number, sort: ({ run }) => run.number },
     entry: { part: 'what', control: { kind: 'text', name: 'number' } },
   },
   {
     key: 'service',
     label: 'Service',
     column: {
-      width: 190,
+      width: 168,
+      always: true,
       text: ({ service }) => service?.name ?? '',
       sort: ({ service }) => service?.position ?? 0,
     },
@@ -68,14 +71,14 @@ export const runFields: readonly RunField[] = [
     },
   },
   {
-    key: 'kind',
-    label: 'Pipe',
-    column: { width: 96, text: ({ run }) => kindText(run.shape), sort: ({ run }) => kindText(run.shape) },
-  },
-  {
     key: 'size',
     label: 'Size',
-    column: { width: 116, text: rowSize, sort: bareSize },
+    column: {
+      width: 150,
+      always: true,
+      text: (row, units) => (isNamed(row) ? `${rowSize(row, units)} ${kindText(row.run.shape)}` : rowSize(row, units)),
+      sort: bareSize,
+    },
     entry: { part: 'size', control: { kind: 'own', name: 'size' }, shapes: ['pipe'] },
   },
   {
@@ -102,7 +105,8 @@ export const runFields: readonly RunField[] = [
     key: 'length',
     label: 'Length',
     column: {
-      width: 84,
+      width: 76,
+      always: true,
       numeric: true,
       unit: 'length',
       text: ({ run }, units) => number(lengthOf(run.shape), 'length', units),
@@ -129,7 +133,7 @@ export const runFields: readonly RunField[] = [
   {
     key: 'place',
     label: 'Place',
-    column: { width: 170, text: ({ place }) => place?.name ?? '', sort: ({ place }) => place?.name ?? '' },
+    column: { width: 150, text: ({ place }) => place?.name ?? '', sort: ({ place }) => place?.name ?? '' },
     entry: { part: 'where', control: { kind: 'choice', name: 'placeId' } },
   },
   { key: 'level', label: 'Level', entry: { part: 'where', control: { kind: 'choice', name: 'levelId' } } },
@@ -147,7 +151,7 @@ export const runFields: readonly RunField[] = [
     key: 'fittings',
     label: 'Fittings',
     column: {
-      width: 200,
+      width: 150,
       grow: true,
       text: ({ run }) => fittingsText(run.fittings),
       sort: ({ run }) => Object.values(run.fittings).reduce((sum, count) => sum + count, 0),
@@ -158,7 +162,8 @@ export const runFields: readonly RunField[] = [
     key: 'thickness',
     label: 'Thickness',
     column: {
-      width: 150,
+      width: 128,
+      always: true,
       numeric: true,
       text: ({ judged }, units) => (judged?.names.length ? thicknessText(judged.names, units) : '–'),
       note: ({ judged }) => judged?.assembly?.source ?? '',
@@ -169,7 +174,7 @@ export const runFields: readonly RunField[] = [
     key: 'surface',
     label: 'Surface',
     column: {
-      width: 84,
+      width: 80,
       numeric: true,
       unit: 'temperature',
       text: ({ judged }, units) => number(judged?.surface, 'temperature', units),
@@ -180,7 +185,7 @@ export const runFields: readonly RunField[] = [
     key: 'heat',
     label: 'Heat',
     column: {
-      width: 108,
+      width: 96,
       numeric: true,
       text: (row, units) => heatText(row, units),
       sort: (row) => heatOf(row) ?? -Infinity,
@@ -190,7 +195,8 @@ export const runFields: readonly RunField[] = [
     key: 'limits',
     label: 'Limits',
     column: {
-      width: 190,
+      width: 156,
+      always: true,
       text: ({ judged }) => runVerdict(judged).words,
       sort: ({ judged }) => runVerdict(judged).words,
     },
@@ -203,6 +209,9 @@ export const runFields: readonly RunField[] = [
     entry: { part: 'state', control: { kind: 'text', name: 'note', optional: true, multiline: 3 } },
   },
 ];
+
+/** A pipe's size says little without what pipe it is; a duct's measures speak for themselves. */
+const isNamed = ({ run }: RunRow) => run.shape.kind === 'pipe';
 
 /** Per metre for pipes and ducts, per square metre for flats: the unit stands with it, for the column holds both. */
 function heatText({ judged }: RunRow, units: UnitSystem): string {

@@ -6,7 +6,7 @@ import { useTheme } from '@/components/theme/use-theme';
 import { webStyle } from '@/components/theme/web-style';
 import { Element } from '@/components/ui/element';
 
-import { columnFields, columnHead, type ColumnField } from './run-fields';
+import { columnHead, type ColumnField } from './run-fields';
 
 export type GridSort = {
   directionOf: (key: string) => 'asc' | 'desc' | undefined;
@@ -17,14 +17,16 @@ const ariaSort = { asc: 'ascending', desc: 'descending' } as const;
 const arrows = { asc: ' ↑', desc: ' ↓' } as const;
 
 /** Names of the columns with their units; pressing one sorts by it, again the other way, again not at all. */
-export function RunsGridHead({ units, sort }: { units: UnitSystem; sort: GridSort }) {
+type RunsGridHeadProps = { fields: readonly ColumnField[]; units: UnitSystem; sort: GridSort };
+
+export function RunsGridHead({ fields, units, sort }: RunsGridHeadProps) {
   const theme = useTheme();
   const colours = { backgroundColor: theme.paper, borderBottomColor: theme.ink };
   return (
     <thead>
       <tr>
         <Element tag="th" scope="col" aria-label="Section" style={[styles.cell, styles.glyph, colours]} />
-        {columnFields.map((field) => (
+        {fields.map((field) => (
           <HeadCell key={field.key} field={field} units={units} sort={sort} />
         ))}
       </tr>

@@ -9,13 +9,14 @@ import { Element } from '@/components/ui/element';
 import { Mark } from '@/components/ui/mark';
 import { Text, Words } from '@/components/ui/text';
 
-import { columnFields, type ColumnField } from './run-fields';
+import type { ColumnField } from './run-fields';
 import { RunGlyph } from './run-glyph';
 import type { RunRow } from './run-row';
 import { runVerdict } from './run-verdict';
 
 type RunsGridRowProps = {
   row: RunRow;
+  fields: readonly ColumnField[];
   units: UnitSystem;
   index: number;
   active: boolean;
@@ -23,7 +24,7 @@ type RunsGridRowProps = {
   onOpen: (row: RunRow) => void;
 };
 
-export function RunsGridRow({ row, units, index, active, chosen, onOpen }: RunsGridRowProps) {
+export function RunsGridRow({ row, fields, units, index, active, chosen, onOpen }: RunsGridRowProps) {
   const theme = useTheme();
   const openOnEnter = (event: KeyboardEvent) => {
     if (event.key !== 'Enter' || event.target !== event.currentTarget) return;
@@ -45,7 +46,7 @@ export function RunsGridRow({ row, units, index, active, chosen, onOpen }: RunsG
       <Element tag="td" style={cell}>
         <RunGlyph judged={row.judged} />
       </Element>
-      {columnFields.map((field) => (
+      {fields.map((field) => (
         <Element key={field.key} tag="td" style={[cell, field.column.numeric && styles.numeric]}>
           <CellText field={field} row={row} units={units} />
         </Element>

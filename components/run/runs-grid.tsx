@@ -16,12 +16,14 @@ type RunsGridProps = {
   rows: readonly RunRow[];
   units: UnitSystem;
   sort: GridSort;
+  /** only the columns that are always there */
+  compact: boolean;
   chosenId: string | undefined;
   onOpen: (row: RunRow) => void;
 };
 
 /** The takeoff as a grid: only the rows in sight are drawn; arrows move, Enter opens. */
-export function RunsGrid({ rows, units, sort, chosenId, onOpen }: RunsGridProps) {
+export function RunsGrid({ rows, units, sort, compact, chosenId, onOpen }: RunsGridProps) {
   // The compiler would keep what the virtualizer changes in place.
   'use no memo';
   const scroll = useRef<HTMLDivElement>(null);
@@ -33,6 +35,7 @@ export function RunsGrid({ rows, units, sort, chosenId, onOpen }: RunsGridProps)
     initialRect: { width: 1024, height: 800 },
   });
   const { active, move } = useActiveRow(rows, chosenId, (index) => virtual.scrollToIndex(index, { align: 'auto' }));
+  const fields = columnFields.filter(({ column }) => !compact || column.always);
   const items = virtual.getVirtualItems();
   const before = items[0]?.start ?? 0;
   const after = virtual.getTotalSize() - (items.at(-1)?.end ?? 0);
@@ -43,10 +46,10 @@ export function RunsGrid({ rows, units, sort, chosenId, onOpen }: RunsGridProps)
         role="grid"
         aria-label="Runs"
         aria-rowcount={rows.length + 1}
-        style={styles.table}
+        style={[styles.table, !compact && styles.whole]}
         onKeyDown={move}
       >
-        <RunsGridHead units={units} sort={sort} />
+        <RunsGridHead fields={fields} units={units} sort={sort} />
         <tbody>
           <Spacer height={before} />
           {items.map(({ index }) => {
@@ -55,6 +58,7 @@ export function RunsGrid({ rows, units, sort, chosenId, onOpen }: RunsGridProps)
               <RunsGridRow
                 key={row.run.id}
                 row={row}
+                fields={fields}
                 units={units}
                 index={index}
                 active={index === active}
@@ -120,8 +124,8 @@ const styles = StyleSheet.create({
     borderCollapse: 'separate',
     borderSpacing: 0,
     tableLayout: 'fixed',
-    minWidth: 1180,
     paddingBottom: space.md,
   }),
+  whole: { minWidth: 1180 },
   spacer: webStyle({ padding: 0, borderWidth: 0 }),
 });

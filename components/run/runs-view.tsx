@@ -17,19 +17,23 @@ type RunsViewProps = {
   chosenId: string | undefined;
   onOpen: (row: RunRow) => void;
   asCards: boolean;
+  /** the form stands beside it */
+  compact: boolean;
+  /** fewer than the job has: what they add up to is said */
+  narrowed: boolean;
 };
 
 /** The narrowed list: a grid where there is room, else cards; below it what the list adds up to. */
-export function RunsView({ rows, units, asCards, ...grid }: RunsViewProps) {
+export function RunsView({ rows, units, asCards, narrowed, ...grid }: RunsViewProps) {
   const [sorting, setSorting] = useState<{ id: string; desc: boolean }[]>([]);
   const { sorted, directionOf, toggle } = useRunsTable({ rows, sorting, onSort: setSorting });
   if (rows.length === 0)
     return <EmptyState title="No run fits">Nothing of this job has all that the lists above ask for.</EmptyState>;
-  const total = (
+  const total = narrowed ? (
     <Text size="small" tone="inkSoft" numeric>
       {totalText(rows, units)}
     </Text>
-  );
+  ) : null;
   if (!asCards)
     return (
       <>

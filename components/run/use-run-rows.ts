@@ -5,9 +5,9 @@ import { usePlaces } from '@/hooks/use-places';
 import { useRuns } from '@/hooks/use-runs';
 import { useServices } from '@/hooks/use-services';
 
-import { joinRuns, runOrder, type RunLookups, type RunRow } from './run-row';
+import { joinRuns, type RunLookups } from './run-row';
 
-/** A job's runs with all that stands beside them, in their own order; undefined until everything is there. */
+/** A job's runs with all that stands beside them, in the order in which they were entered; undefined until everything is there. */
 export function useRunRows(jobId: string) {
   const runs = useRuns(jobId);
   const judgement = useJudgement(jobId);
@@ -17,12 +17,10 @@ export function useRunRows(jobId: string) {
   const sizes = usePipeSizes();
   const problem = [runs, services, places, basis, sizes].find((one) => one.problem)?.problem ?? judgement.problem;
   const lookups = toLookups(services.services, places.places, { ...basis, pipeSizes: sizes.data });
-  const rows = runs.runs && lookups ? inOrder(joinRuns(runs.runs, judgement.judgement, lookups)) : undefined;
+  const rows = runs.runs && lookups ? joinRuns(runs.runs, judgement.judgement, lookups) : undefined;
   const reload = () => [runs, judgement, services, places, sizes].forEach((one) => one.reload());
   return { rows, lookups, problem, reload };
 }
-
-const inOrder = (rows: RunRow[]) => rows.toSorted((one, other) => runOrder(one.run.number, other.run.number));
 
 type Rest = { levels?: RunLookups['levels']; drawings?: RunLookups['drawings']; pipeSizes?: RunLookups['pipeSizes'] };
 

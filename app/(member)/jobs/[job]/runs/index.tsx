@@ -51,6 +51,8 @@ export default function RunsScreen() {
           units={units}
           chosenId={beside}
           asCards={isPhone}
+          compact={beside !== undefined}
+          narrowed={Object.keys(filter).length > 0}
           onOpen={({ run }) =>
             mayEdit
               ? router.setParams({ edit: run.id })
