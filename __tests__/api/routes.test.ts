@@ -10,7 +10,7 @@ import { startStack, type Stack } from '../support/stack';
 import { newWorld, pathIn, type World } from '../support/world';
 
 /** Whoever opens a route to everyone says so here too. */
-const opened = ['GET /health', 'GET /ready', 'POST /session'];
+const opened = ['GET /health', 'GET /ready', 'POST /session', 'GET /links/:token', 'GET /links/:token/pdf'];
 
 let stack: Stack;
 let routes: Route[];
@@ -34,7 +34,7 @@ beforeAll(async () => {
     await newMember(stack.services, owner, { role: 'foreman' }),
   ];
   people = await Promise.all(members.map(async (member) => ({ member, agent: await signedIn(stack, member) })));
-  world = await newWorld(await signedIn(stack, owner));
+  world = await newWorld(await signedIn(stack, owner), stack.services);
 }, 30_000);
 afterAll(() => stack.stop());
 
