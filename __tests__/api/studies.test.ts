@@ -67,6 +67,9 @@ it('opens the working of a number', async () => {
     const { steps } = workingSchema.parse((await working(`candidate=2&about=${about}`).expect(200)).body);
     expect(steps.length).toBeGreaterThan(0);
   }
+  const { used } = runStudySchema.parse((await agent.get(`${path}/runs/${runOf('R30').id}/study`)).body);
+  const [shown, named] = [await working(''), await working(`candidate=${used}&about=heat-flow`)];
+  expect(shown.body).toEqual(named.body);
   await working('candidate=2&about=nonsense').expect(400);
   await working('candidate=-1&about=touch').expect(400);
   await working('candidate=99&about=touch').expect(422);

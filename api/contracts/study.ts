@@ -132,9 +132,9 @@ export const workingSchema = z.object({
 });
 export type Working = z.infer<typeof workingSchema>;
 
-/** Which number of a study is opened; in a query a number is text. */
+/** Which number of a study is opened, of what is put up unless another candidate is named; in a query a number is text. */
 export const workingAskedSchema = z.object({
-  candidate: z.coerce.number({ error: 'Must be a number' }).int('Must be a whole number').min(0),
-  about: z.enum(['surface', ...limitKinds]),
+  candidate: z.coerce.number({ error: 'Must be a number' }).int('Must be a whole number').min(0).optional(),
+  about: z.enum(['surface', ...limitKinds]).default('heat-flow'),
 });
 export type WorkingAsked = z.infer<typeof workingAskedSchema>;

@@ -43,8 +43,10 @@ export function createStudyService({ withFirm }: { withFirm: WithFirm }) {
     /** @throws AppError `cannot-calculate` when the run has no study; EngineError when it has no such thickness or limit */
     async working(member: Member, { job, run }: { job: string; run: string }, asked: WorkingAsked): Promise<Working> {
       const judged = await judgeOne(member, job, run);
-      if (!judged.input || !judged.study) throw noStudy(judged);
-      return working(judged.input, asked);
+      const { input, study, used } = judged;
+      if (!input || !study) throw noStudy(judged);
+      const shown = used ? study.candidates.indexOf(used) : study.candidates.length - 1;
+      return working(input, { ...asked, candidate: asked.candidate ?? shown });
     },
     async schedule(member: Member, job: string): Promise<Schedule> {
       const data = await load(member, job);
