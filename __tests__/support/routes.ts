@@ -31,9 +31,10 @@ function walk(stack: unknown): Route[] {
 function routesIn({ path, stack }: NonNullable<Layer['route']>): Route[] {
   const methods = [...new Set(stack.map(({ method }) => method))];
   return methods.map((method) => {
-    const [first] = stack.filter((handler) => handler.method === method);
-    const rule = ruleSchema.safeParse(first?.handle.rule);
-    return { name: `${method.toUpperCase()} ${path}`, method, path, rule: rule.data };
+    // a rule stands before the handler that answers, which is the last
+    const guards = stack.filter((handler) => handler.method === method).slice(0, -1);
+    const rules = guards.map(({ handle }) => ruleSchema.safeParse(handle.rule)).filter(({ success }) => success);
+    return { name: `${method.toUpperCase()} ${path}`, method, path, rule: rules[0]?.data };
   });
 }
 
