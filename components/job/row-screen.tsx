@@ -46,7 +46,7 @@ function Gone({ noun, back }: { noun: string; back: Back }) {
   return (
     <Screen title={`This ${noun} is not there`} back={back}>
       <EmptyState title="Perhaps it was deleted" action={{ label: `To ${back.label.toLowerCase()}`, href: back.href }}>
-        {`The address leads to a ${noun} that this job does not have any more.`}
+        {`The address leads to a ${noun} that is not there any more.`}
       </EmptyState>
     </Screen>
   );
