@@ -1,8 +1,11 @@
 const { getDefaultConfig } = require('expo/metro-config');
 const http = require('node:http');
 
+const { isUnused } = require('./scripts/web/unused-modules');
+
 const config = getDefaultConfig(__dirname);
 const folder = __dirname.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
+const standIn = require.resolve('./scripts/web/stand-in');
 const upstream = config.resolver.resolveRequest;
 
 config.resolver.blockList = [
@@ -14,7 +17,8 @@ config.resolver.blockList = [
 config.resolver.resolveRequest = (context, name, platform) => {
   if (/[\\/]zod[\\/]/.test(context.originModulePath) && /(^|\/)locales\/index\.js$/.test(name))
     return { type: 'empty' };
-  return (upstream ?? context.resolveRequest)(context, name, platform);
+  const found = (upstream ?? context.resolveRequest)(context, name, platform);
+  return found.type === 'sourceFile' && isUnused(found.filePath) ? { ...found, filePath: standIn } : found;
 };
 
 // Development only: /api goes through the dev server, so the browser sees one origin.
