@@ -1,14 +1,19 @@
 import { useState } from 'react';
 
+import type { Judgement } from '@/api/contracts/judgement';
+import type { Revision } from '@/api/contracts/revision';
 import { problemOf } from '@/components/forms/show-problem';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 import { useToast } from '@/components/ui/toast';
 
-type FreezeButtonProps = { letter: string; runs: number; flags: number; onFreeze: () => Promise<unknown> };
+import { nextLetter } from './next-letter';
+
+type FreezeButtonProps = { revisions: readonly Revision[]; judgement: Judgement; onFreeze: () => Promise<unknown> };
 
 /** Freezing commits what stands now under the next letter; nothing recomputes it afterwards. */
-export function FreezeButton({ letter, runs, flags, onFreeze }: FreezeButtonProps) {
+export function FreezeButton({ revisions, judgement, onFreeze }: FreezeButtonProps) {
+  const letter = nextLetter(revisions.map((revision) => revision.letter));
   const [asks, setAsks] = useState(false);
   const [busy, setBusy] = useState(false);
   const toast = useToast();
@@ -36,9 +41,15 @@ export function FreezeButton({ letter, runs, flags, onFreeze }: FreezeButtonProp
           onConfirm={() => void freeze()}
           onCancel={() => setAsks(false)}
         >
-          {`${runs} runs as they stand now, with ${flags} ${flags === 1 ? 'flag' : 'flags'} printed as clarifications. Later edits go into the next revision; an earlier one is superseded.`}
+          {whatIsFrozen(judgement)}
         </ConfirmDialog>
       ) : null}
     </>
   );
+}
+
+function whatIsFrozen({ runs }: Judgement): string {
+  const flags = runs.reduce((sum, run) => sum + run.flags.length, 0);
+  const printed = `${flags} ${flags === 1 ? 'flag' : 'flags'} printed as clarifications`;
+  return `${runs.length} runs as they stand now, with ${printed}. Later edits go into the next revision; an earlier one is superseded.`;
 }

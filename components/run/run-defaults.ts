@@ -25,22 +25,14 @@ export function asShape(kind: ShapeKind, before: ShapeValues): ShapeValues {
 
 /** A new run begins with what the last one had: service, place, level, drawing and kind of pipe. */
 export function newRun(last: Run | undefined, number: string): RunValues {
-  return {
-    number,
-    title: '',
-    serviceId: last?.serviceId ?? '',
-    placeId: last?.placeId ?? '',
-    levelId: last?.levelId ?? '',
-    drawingId: last?.drawingId ?? null,
-    shape: last ? { ...asShape(last.shape.kind, last.shape), length: undefined } : empty.pipe,
-    elevation: last?.elevation ?? null,
-    fittings: {},
-    status: 'measured',
-    hold: null,
-    override: null,
-    note: '',
-  };
+  const blank = { number, title: '', fittings: {}, status: 'measured', hold: null, override: null, note: '' } as const;
+  if (!last) return { ...blank, ...nowhere, shape: empty.pipe };
+  const { serviceId, placeId, levelId, drawingId, elevation } = last;
+  const shape = { ...asShape(last.shape.kind, last.shape), length: undefined };
+  return { ...blank, serviceId, placeId, levelId, drawingId, elevation, shape };
 }
+
+const nowhere = { serviceId: '', placeId: '', levelId: '', drawingId: null, elevation: null };
 
 /** "R43" after "R42", "R01" where there is none. */
 export function nextNumber(numbers: readonly string[]): string {

@@ -1,6 +1,7 @@
 import { useState } from 'react';
 
 import type { Run } from '@/api/contracts/run';
+import { useLayout } from '@/components/theme/use-layout';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 import { LinkButton } from '@/components/ui/link';
@@ -25,12 +26,9 @@ type RunEditorProps = {
 export function RunEditor({ jobId, row, rows, lookups, onClose, onSaved }: RunEditorProps) {
   const toast = useToast();
   const [copied, setCopied] = useState<Run>();
-  const numbers = rows.map(({ run }) => run.number);
-  const last = rows.at(-1)?.run;
+  const number = nextNumber(rows.map((one) => one.run.number));
+  const begun = copied ? { ...copied, number } : newRun(rows.at(-1)?.run, number);
   const run = copied ? null : (row?.run ?? null);
-  const initial = copied
-    ? { ...copied, number: nextNumber(numbers), override: copied.override }
-    : (run ?? newRun(last, nextNumber(numbers)));
   const saved = (stored: Run) => {
     toast({ text: `${stored.number} is saved.` });
     setCopied(undefined);
@@ -38,10 +36,10 @@ export function RunEditor({ jobId, row, rows, lookups, onClose, onSaved }: RunEd
   };
   return (
     <RunForm
-      key={copied ? `copy of ${copied.id}` : (run?.id ?? 'new')}
+      key={`${run?.id} ${copied?.id}`}
       jobId={jobId}
       run={run}
-      initial={initial}
+      initial={run ?? begun}
       lookups={lookups}
       onSaved={saved}
       onCancel={onClose}
@@ -56,6 +54,7 @@ function RunActions({ jobId, run, onCopy, onRemoved }: RunActionsProps) {
   const [asks, setAsks] = useState(false);
   const [busy, setBusy] = useState(false);
   const toast = useToast();
+  const { isPhone } = useLayout();
   const { remove, create } = useRunActions(jobId);
   const { id: _id, version: _version, ...input } = run;
   const removeIt = async () => {
@@ -74,7 +73,9 @@ function RunActions({ jobId, run, onCopy, onRemoved }: RunActionsProps) {
   };
   return (
     <>
-      <LinkButton label="Study" href={{ pathname: '/jobs/[job]/runs/[run]', params: { job: jobId, run: run.id } }} />
+      {isPhone ? null : (
+        <LinkButton label="Study" href={{ pathname: '/jobs/[job]/runs/[run]', params: { job: jobId, run: run.id } }} />
+      )}
       <Button label="Another like it" onPress={onCopy} />
       <Button label="Remove" name={`Remove run ${run.number}`} onPress={() => setAsks(true)} />
       {asks ? (

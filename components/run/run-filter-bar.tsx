@@ -1,8 +1,11 @@
 import { StyleSheet, View } from 'react-native';
 
 import { space } from '@/components/theme/tokens';
+import { useLayout } from '@/components/theme/use-layout';
 import { Button } from '@/components/ui/button';
+import { Disclosure } from '@/components/ui/disclosure';
 import { Select } from '@/components/ui/select';
+import { Text } from '@/components/ui/text';
 
 import type { FilterChoice, FilterKey, RunFilter } from './run-filters';
 
@@ -15,8 +18,24 @@ type RunFilterBarProps = {
 
 const all = 'all';
 
-/** One list for each thing that runs can be narrowed by; "all" first. */
-export function RunFilterBar({ choices, filter, onChange, onClear }: RunFilterBarProps) {
+/** One list for each thing that runs can be narrowed by; on a phone they are folded away until asked for. */
+export function RunFilterBar(props: RunFilterBarProps) {
+  const { isPhone } = useLayout();
+  if (!isPhone) return <FilterLists {...props} />;
+  return (
+    <Disclosure summary={<Text>{narrowedText(props)}</Text>}>
+      <FilterLists {...props} />
+    </Disclosure>
+  );
+}
+
+/** "Narrow the list", or what it is narrowed to: "Steam, Service tunnel". */
+function narrowedText({ choices, filter }: RunFilterBarProps): string {
+  const chosen = choices.flatMap(({ key, options }) => options.find(({ value }) => value === filter[key])?.label ?? []);
+  return chosen.join(', ') || 'Narrow the list';
+}
+
+function FilterLists({ choices, filter, onChange, onClear }: RunFilterBarProps) {
   const isNarrowed = Object.values(filter).some(Boolean);
   return (
     <View role="group" aria-label="Narrow the list" style={styles.bar}>

@@ -9,12 +9,14 @@ export const flagFilters = { flagged: 'Flagged', hold: 'On hold', clear: 'Meets 
 
 export const narrow = (rows: readonly RunRow[], filter: RunFilter): RunRow[] => rows.filter((row) => fits(row, filter));
 
-const fits = ({ run, judged }: RunRow, { service, place, level, drawing, flags }: RunFilter): boolean =>
-  (!service || run.serviceId === service) &&
-  (!place || run.placeId === place) &&
-  (!level || run.levelId === level) &&
-  (!drawing || run.drawingId === drawing) &&
-  fitsFlags(judged?.flags ?? [], flags);
+const fits = ({ run, judged }: RunRow, filter: RunFilter): boolean =>
+  isAsked(run.serviceId, filter.service) &&
+  isAsked(run.placeId, filter.place) &&
+  isAsked(run.levelId, filter.level) &&
+  isAsked(run.drawingId, filter.drawing) &&
+  fitsFlags(judged?.flags ?? [], filter.flags);
+
+const isAsked = (id: string | null, wanted: string | undefined) => !wanted || id === wanted;
 
 function fitsFlags(flags: readonly { kind: string }[], wanted: string | undefined): boolean {
   if (wanted === 'flagged') return flags.some(({ kind }) => kind !== 'hold');
