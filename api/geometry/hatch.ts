@@ -17,7 +17,7 @@ function drawn(region: Region, { lines, dots, dotRadius }: Marks): string {
 }
 
 /** A line of several points, cut where it leaves the region; parts that meet stay one stroke. */
-export function cut(region: Region, line: readonly Point[]): string {
+function cut(region: Region, line: readonly Point[]): string {
   let path = '';
   let end = '';
   for (let index = 1; index < line.length; index++) {

@@ -37,11 +37,16 @@ export function section(drawn: SectionInput, size: number): SectionDrawing {
   return draw(drawn, { size, scale: (size - 2 * marginOf(size)) / Math.max(extent.width, extent.height) });
 }
 
-/** A section at a given scale [drawing units per m], in the smallest square that takes it: for several side by side. */
-export function sectionToScale(drawn: SectionInput, scale: number): SectionDrawing {
+/**
+ * A section at a given scale, in the smallest square that takes it: for several side by side.
+ *
+ * @param scale - drawing units per m
+ * @param detail - side of a square for which pens and hatches are chosen, so that neighbours look alike; else its own
+ */
+export function sectionToScale(drawn: SectionInput, scale: number, detail?: number): SectionDrawing {
   const extent = extentOf(drawn);
   const side = Math.max(extent.width, extent.height) * scale;
-  return draw(drawn, { size: side + 2 * marginOf(side), scale });
+  return draw(drawn, { size: side + 2 * marginOf(detail ?? side), scale, detail });
 }
 
 /** Of a wall a piece is cut out: its height, and the plate, which no run tells [m]. */
@@ -62,12 +67,12 @@ const pensOf = (size: number) =>
     : { jacket: 1.8, outline: 0.8, wall: size <= 160 ? 1.5 : 2.2, hatch: size <= 160 ? 0.7 : 0.8 };
 const pitchOf = (size: number) => (size <= 48 ? 4.6 : size <= 160 ? 7 : 10);
 
-type Sheet = { size: number; scale: number };
+type Sheet = { size: number; scale: number; detail?: number };
 
-function draw(drawn: SectionInput, { size, scale }: Sheet): SectionDrawing {
+function draw(drawn: SectionInput, { size, scale, detail = size }: Sheet): SectionDrawing {
   const outlines = outlinesOf(drawn, { size, scale });
   const [bore, outside] = [outlines[0]!, outlines.at(-1)!];
-  const [pitch, pens] = [pitchOf(size), pensOf(size)];
+  const [pitch, pens] = [pitchOf(detail), pensOf(detail)];
   return {
     size: rounded(size),
     scale,

@@ -1,7 +1,7 @@
 import type { ScaleLinear } from 'd3-scale';
+import { line } from 'd3-shape';
 
-import { cut } from './hatch';
-import { rounded, type Point } from './outlines';
+import { rounded } from './outlines';
 import { extentOf, sectionToScale, type SectionDrawing, type SectionInput } from './section';
 import { scaleOf } from './strip-scale';
 
@@ -64,7 +64,7 @@ export function strip(input: StripInput, room: StripRoom): StripLayout {
       levels.map((level) => level.y),
     ),
     levels,
-    ticks: y.ticks(5).map((value) => ({ value, y: rounded(y(value)) })),
+    ticks: y.ticks(4).map((value) => ({ value, y: rounded(y(value)) })),
   };
 }
 
@@ -75,8 +75,9 @@ function columnsOf(sections: readonly SectionInput[], { pitch, base, tallest }: 
   const widest = Math.max(...extents.map(({ width }) => width));
   const highest = Math.max(...extents.map(({ height }) => height));
   const scale = Math.min((pitch - 8) / widest, tallest / highest);
+  const detail = Math.max(widest, highest) * scale;
   return sections.map((section, index) => {
-    const drawing = sectionToScale(section, scale);
+    const drawing = sectionToScale(section, scale, detail);
     const x = (index + 0.5) * pitch;
     const { box } = drawing;
     const drawingLeft = rounded(x - box.x - box.width / 2);
@@ -87,15 +88,17 @@ function columnsOf(sections: readonly SectionInput[], { pitch, base, tallest }: 
 type Scale = ScaleLinear<number, number>;
 
 function curveOf({ id, values }: StripInput['curves'][number], xs: readonly number[], y: Scale): StripCurve {
-  const [bottom, top] = edgesOf(y);
-  const whole: Point[] = values.flatMap((value, index) => (value === null ? [] : [[xs[index]!, y(value)]]));
-  const frame = { kind: 'box' as const, x: 0, y: top, width: xs.at(-1)! + xs[0]!, height: bottom - top };
-  return {
-    id,
-    path: cut({ outer: frame, inner: null }, whole),
-    points: values.map((value, index) => (value === null ? null : pointOf(value, xs[index]!, y))),
-  };
+  const points = values.map((value, index) => (value === null ? null : pointOf(value, xs[index]!, y)));
+  return { id, path: throughPoints(points) ?? '', points };
 }
+
+/** The curve goes through what lies on the scale, straight between thicknesses that are made. */
+const throughPoints = line<StripPoint | null>(
+  (point) => point?.x ?? 0,
+  (point) => point?.y ?? 0,
+)
+  .defined((point) => point !== null && point.off === null)
+  .digits(1);
 
 function pointOf(value: number, x: number, y: Scale): StripPoint {
   const [bottom, top] = edgesOf(y);
@@ -113,8 +116,9 @@ function withLabels(curves: readonly StripCurve[], levels: readonly number[]): S
     const points = curve.points.map((point, index) => {
       if (!point || point.off) return point;
       const taken = [...levels, ...others.flatMap(({ points }) => points[index]?.y ?? [])];
-      const free = preferred.find((offset) => taken.every((y) => Math.abs(point.y + offset - y) > clear));
-      return { ...point, labelY: rounded(point.y + (free ?? preferred[0]!)) };
+      const room = (offset: number) => Math.min(clear, ...taken.map((y) => Math.abs(point.y + offset - y)));
+      const offset = preferred.toSorted((one, other) => room(other) - room(one))[0]!;
+      return { ...point, labelY: rounded(point.y + offset) };
     });
     return { ...curve, points };
   });

@@ -105,7 +105,7 @@ function OffScale({ point: { x, y, off }, ink, label }: { point: StripPoint; ink
     <G>
       <Path d={tip} fill={ink} />
       <Number x={x} y={up ? y + 8 : y - 20} fill={ink} halo={theme.paper}>
-        {label}
+        {label.replace(/\.\d+$/, '')}
       </Number>
     </G>
   );

@@ -1,20 +1,19 @@
 import type { Place } from '@/api/contracts/place';
 import type { Service } from '@/api/contracts/service';
-import type { RunStudy } from '@/api/contracts/study';
 
-import { natureOf } from './study-facts';
+import type { StudiedRun } from './study-facts';
 
 export type Caution = { key: string; title: string; text: string };
 
-type Around = { runStudy: RunStudy; place: Place | undefined; service: Service | undefined };
+type Around = { runStudy: StudiedRun; place: Place | undefined; service: Service | undefined };
 
 /** From here up a bare surface can burn in a short contact [°C]: lowest of the usual project limits for vulnerable people. */
 const burnsFrom = 43;
 const isForTaps = /domestic|potable|drinking|tap water/i;
 
 /** What can hurt someone about this run, said where it matters and never cheerfully. */
-export function cautionsOf({ runStudy: { study }, place, service }: Around): Caution[] {
-  const isHot = natureOf(study) === 'hot';
+export function cautionsOf({ runStudy: { study, nature }, place, service }: Around): Caution[] {
+  const isHot = nature === 'hot';
   const isCold = !isHot || service?.states.some(({ nature }) => nature === 'cold');
   return [
     ...(warmestBare(study) > burnsFrom ? [hotSurfaces] : []),
@@ -28,7 +27,7 @@ const isTapped = (service: Service | undefined) =>
   service !== undefined && isForTaps.test(`${service.name} ${service.fluid}`);
 
 /** The bare surface where it is judged at its warmest [°C]. */
-function warmestBare({ candidates: [bare] }: RunStudy['study']): number {
+function warmestBare({ candidates: [bare] }: StudiedRun['study']): number {
   const touched = bare?.verdicts.find(({ kind }) => kind === 'touch')?.value;
   return Math.max(touched ?? -Infinity, bare?.heat.surface ?? -Infinity);
 }

@@ -51,7 +51,12 @@ export function DepartureDialog({ run, title, children, initial, finishes, chang
       <Text>{children}</Text>
       {isStale ? <TheirsNotice run={run} /> : null}
       {finishes ? (
-        <FormSelect control={form.control} name="finishId" label="Finish for this run" options={finishes} />
+        <FormSelect
+          control={form.control}
+          name="finishId"
+          label="Finish for this run, with its emittance"
+          options={finishes}
+        />
       ) : null}
       <FormTextField
         control={form.control}

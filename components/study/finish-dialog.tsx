@@ -31,5 +31,5 @@ export function FinishDialog({ jobId, run, runStudy: { assembly }, row, onClose 
 
 const optionOf = ({ id, name, emittanceNew, emittanceAged }: LibraryFinish) => ({
   value: id,
-  label: `${name}: emittance ${emittanceNew.toFixed(2)} new, ${emittanceAged.toFixed(2)} aged`,
+  label: `${name} (${emittanceNew.toFixed(2)} new, ${emittanceAged.toFixed(2)} aged)`,
 });

@@ -28,6 +28,8 @@ const marks: Record<LimitVerdict['verdict'], { verdict: Verdict; words: string }
 export function JudgedAt({ candidate, onWorking }: JudgedAtProps) {
   const { units } = useUnits();
   const { heat, verdicts } = candidate;
+  // where heat flow is limited, its working is the limit's
+  const hasHeatLimit = verdicts.some(({ kind }) => kind === 'heat-flow');
   return (
     <Stack gap="xxs">
       <Heading>{`${capital(candidateName(candidate, units))} judged at`}</Heading>
@@ -38,7 +40,7 @@ export function JudgedAt({ candidate, onWorking }: JudgedAtProps) {
         term="Heat flow"
         text={heatText(candidate, units, 1)}
         note={`${conditionsText(heat.judgedAt, units)}; ${heat.judgedAt.source}`}
-        onWorking={() => onWorking('heat-flow')}
+        onWorking={() => onWorking(hasHeatLimit ? 'surface' : 'heat-flow')}
       />
     </Stack>
   );
@@ -75,6 +77,7 @@ function Line({ term, mark, text, note, onWorking }: LineProps) {
       <View style={styles.term}>
         <Text weight="strong">{term}</Text>
         {mark ? <Mark {...mark} /> : null}
+        {onWorking ? <Button label="Working" name={`Working of ${term.toLowerCase()}`} onPress={onWorking} /> : null}
       </View>
       <View style={styles.words}>
         <Text>{text}</Text>
@@ -84,7 +87,6 @@ function Line({ term, mark, text, note, onWorking }: LineProps) {
           </Text>
         ) : null}
       </View>
-      {onWorking ? <Button label="Working" name={`Working of ${term.toLowerCase()}`} onPress={onWorking} /> : null}
     </View>
   );
 }
@@ -100,6 +102,6 @@ const styles = StyleSheet.create({
     paddingVertical: space.xs,
     borderBottomWidth: hairline,
   },
-  term: { width: 92, flexShrink: 0 },
+  term: { width: 104, flexShrink: 0, alignItems: 'flex-start', gap: space.xxs },
   words: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
 });

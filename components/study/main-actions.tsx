@@ -42,13 +42,16 @@ export function MainActions({ of, standing, selected, full }: MainActionsProps) 
         {use ? (
           <Button
             label={`Use ${nameOf(use.place)}`}
-            tone="action"
+            tone={use.isDue ? 'action' : 'quiet'}
             full={full}
             onPress={() => (use.asSpecified ? put(use.place) : ask('Use', use.place))}
           />
         ) : null}
         {keep === null ? null : (
-          <Button label={`Keep ${nameOf(keep)}, with a reason`} onPress={() => ask('Keep', keep)} />
+          <Button
+            label={full ? `Keep ${nameOf(keep)}` : `Keep ${nameOf(keep)}, with a reason`}
+            onPress={() => ask('Keep', keep)}
+          />
         )}
         {selected === of.runStudy.used ? <Text tone="inkSoft">{`${nameOf(selected)} is what goes up.`}</Text> : null}
       </Row>

@@ -6,24 +6,17 @@ import { ProblemWords } from '@/components/ui/problem-words';
 import { Screen } from '@/components/ui/screen';
 import { Row } from '@/components/ui/stack';
 import { useMay } from '@/hooks/use-session';
-import { useUnits } from '@/hooks/use-units';
 
-import { NeighbourLinks } from './neighbour-links';
 import type { Neighbours } from './neighbours';
-import { runOver, runTitle } from './run-words';
+import { useRunHead } from './use-run-head';
 
 type NoStudyScreenProps = { jobId: string; row: RunRow; problem: Problem; neighbours: Neighbours; onRetry: () => void };
 
 /** A run without a study: what is missing or wrong, and the way to put it right. */
 export function NoStudyScreen({ jobId, row, problem, neighbours, onRetry }: NoStudyScreenProps) {
-  const { units } = useUnits();
+  const head = useRunHead({ jobId, row, neighbours });
   return (
-    <Screen
-      title={runTitle(row, units)}
-      over={runOver(row, units)}
-      back={{ href: { pathname: '/jobs/[job]/runs', params: { job: jobId } }, label: 'Runs' }}
-      aside={<NeighbourLinks jobId={jobId} neighbours={neighbours} />}
-    >
+    <Screen {...head}>
       {row.judged?.flags.some(({ kind }) => kind === 'not-specified') ? (
         <NothingSays jobId={jobId} service={row.service?.name ?? 'this service'} />
       ) : (

@@ -1,7 +1,6 @@
 import { useState } from 'react';
 
 import { Button } from '@/components/ui/button';
-import { LinkButton } from '@/components/ui/link';
 import { Notice } from '@/components/ui/notice';
 import { Row, Stack } from '@/components/ui/stack';
 
@@ -15,7 +14,7 @@ import { useDepartures } from './use-departures';
 
 type OtherActionsProps = { of: Deciding; title: string; standing: Standing; mayEdit: boolean };
 
-/** The same as a table, another finish, the specification again, the run's own form. */
+/** The same as a table, another finish, the specification again. */
 export function OtherActions({ of, title, standing, mayEdit }: OtherActionsProps) {
   const [open, setOpen] = useState<'table' | 'finish'>();
   const [problem, setProblem] = useState<string>();
@@ -28,7 +27,6 @@ export function OtherActions({ of, title, standing, mayEdit }: OtherActionsProps
       setProblem(notSaved(error)),
     );
   };
-  const edit = { pathname: '/jobs/[job]/runs/[run]/edit', params: { job: of.jobId, run: of.run.id } } as const;
   return (
     <Stack gap="xs">
       {problem ? (
@@ -40,7 +38,6 @@ export function OtherActions({ of, title, standing, mayEdit }: OtherActionsProps
         <Button label="As a table" onPress={() => setOpen('table')} />
         {mayEdit ? <Button label="Change the finish" onPress={() => setOpen('finish')} /> : null}
         {mayEdit && back ? <Button label="Back to the specification" onPress={goBack} /> : null}
-        {mayEdit ? <LinkButton label="Edit the run" href={edit} /> : null}
       </Row>
       {open === 'table' ? (
         <StudyTableDialog title={title} runStudy={of.runStudy} standing={standing} onClose={close} />

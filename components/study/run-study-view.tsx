@@ -4,7 +4,7 @@ import { StyleSheet, View } from 'react-native';
 import { space } from '@/components/theme/tokens';
 import { useLayout } from '@/components/theme/use-layout';
 import { Notice } from '@/components/ui/notice';
-import { Grid, Rule, Stack } from '@/components/ui/stack';
+import { Row, Rule, Stack } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
 
 import { cautionsOf, standingCaution } from './cautions';
@@ -39,20 +39,26 @@ export function RunStudyView({ of, row, title, standing, selected, onSelect, may
   return (
     <Stack gap="md">
       {isPhone ? null : <StudySentence runStudy={runStudy} />}
-      <CurveKey study={runStudy.study} />
+      <CurveKey runStudy={runStudy} />
       <View style={isPhone ? styles.bleed : null}>
         <ThicknessStrip {...{ runStudy, standing, selected, onSelect }} />
       </View>
-      {isPhone || !mayEdit ? null : <MainActions of={of} standing={standing} selected={selected} />}
-      <OtherActions of={of} title={title} standing={standing} mayEdit={mayEdit} />
+      {isPhone ? (
+        <OtherActions of={of} title={title} standing={standing} mayEdit={mayEdit} />
+      ) : (
+        <Row>
+          {mayEdit ? <MainActions of={of} standing={standing} selected={selected} /> : null}
+          <OtherActions of={of} title={title} standing={standing} mayEdit={mayEdit} />
+        </Row>
+      )}
       <Rule />
-      <Grid gap="xl" column={340}>
-        {candidate ? <JudgedAt candidate={candidate} onWorking={setAbout} /> : null}
-        <Stack gap="md">
+      <View style={styles.beside}>
+        <View style={styles.judged}>{candidate ? <JudgedAt candidate={candidate} onWorking={setAbout} /> : null}</View>
+        <View style={styles.why}>
           <WhyNotThinner runStudy={runStudy} />
           <Cautions {...{ of, row }} />
-        </Stack>
-      </Grid>
+        </View>
+      </View>
       {about ? (
         <WorkingDialog
           of={{ jobId: of.jobId, runId: of.run.id }}
@@ -79,4 +85,9 @@ function Cautions({ of: { runStudy }, row: { place, service } }: Pick<RunStudyVi
   );
 }
 
-const styles = StyleSheet.create({ bleed: { marginHorizontal: -space.md } });
+const styles = StyleSheet.create({
+  bleed: { marginHorizontal: -space.md },
+  beside: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.xl, rowGap: space.lg },
+  judged: { flexGrow: 3, flexShrink: 1, flexBasis: 400, minWidth: 0, maxWidth: 720 },
+  why: { flexGrow: 2, flexShrink: 1, flexBasis: 260, minWidth: 0, maxWidth: 560, gap: space.md },
+});

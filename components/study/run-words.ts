@@ -26,7 +26,11 @@ export function runOver({ run, service, drawing }: RunRow, units: UnitSystem): s
     .join(' · ');
 }
 
-/** "38 mm Mineral fibre pipe insulation under Aluminium sheet jacket, chosen": what goes up, and who says so. */
+/** Hot or cold as the service is, or as the run's own state says. */
+export const natureOf = ({ run, judged, service }: RunRow): 'hot' | 'cold' =>
+  run.override?.state?.nature ?? judged?.nature ?? service?.states[0]?.nature ?? 'hot';
+
+/** "38 mm mineral fibre pipe insulation under Aluminium sheet jacket, chosen": what goes up, and who says so. */
 export function assemblyText({ assembly }: RunStudy, units: UnitSystem): string {
   const layers = assembly.layers.map(({ materialName, thickness }) =>
     thickness === null

@@ -17,7 +17,10 @@ import { marksOf } from './candidate-words';
 type StripColumnProps = {
   ref?: Ref<HTMLButtonElement>;
   placed: Placed;
+  /** from the top of the columns down to the base line */
   base: number;
+  /** from the top of the drawing down to that of the columns */
+  above: number;
   pitch: number;
   candidate: Candidate;
   name: string;
@@ -31,14 +34,16 @@ type StripColumnProps = {
   onKeyDown: (event: KeyboardEvent) => void;
 };
 
-/** How far the selected section is lifted off the base line. */
+/** How far the selected section is lifted off the base line, and the room over the tallest one that this takes. */
 const raise = 8;
+export const headroom = raise + space.sm + 2;
 
-export function StripColumn({ placed, base, pitch, candidate, selected, ...column }: StripColumnProps) {
+export function StripColumn({ placed, base, above, pitch, candidate, selected, ...column }: StripColumnProps) {
   const theme = useTheme();
   const { name, heat, words, said, onSelect, onKeyDown, ref } = column;
-  const { drawing, drawingLeft, drawingTop, left } = placed;
-  const cardTop = drawingTop + drawing.box.y - raise - space.sm;
+  const { drawing, drawingLeft, left } = placed;
+  const top = placed.drawingTop - above - (selected ? raise : 0);
+  const cardTop = top + drawing.box.y - space.sm;
   return (
     <Element
       tag="button"
@@ -55,7 +60,7 @@ export function StripColumn({ placed, base, pitch, candidate, selected, ...colum
       {selected ? (
         <View style={[styles.card, { top: cardTop, backgroundColor: theme.sheet, borderColor: theme.oxide }]} />
       ) : null}
-      <View style={[styles.drawing, { left: drawingLeft - left, top: selected ? drawingTop - raise : drawingTop }]}>
+      <View style={[styles.drawing, { left: drawingLeft - left, top }]}>
         <Svg aria-hidden width={drawing.size} height={drawing.size} viewBox={`0 0 ${drawing.size} ${drawing.size}`}>
           <SectionPaths drawing={drawing} />
         </Svg>

@@ -7,13 +7,13 @@ import { webStyle } from '@/components/theme/web-style';
 import { Text } from '@/components/ui/text';
 
 /** Left of the strip on a wide screen: the scale of the plot, and what the quiet row is in. */
-export const gutter = 52;
+export const gutters = { SI: 52, IP: 84 } as const;
 
-type StripAxisProps = { layout: StripLayout; unit: string; heatUnit: string };
+type StripAxisProps = { layout: StripLayout; width: number; unit: string; heatUnit: string };
 
-export function StripAxis({ layout, unit, heatUnit }: StripAxisProps) {
+export function StripAxis({ layout, width, unit, heatUnit }: StripAxisProps) {
   return (
-    <View aria-hidden style={styles.axis}>
+    <View aria-hidden style={[styles.axis, { width }]}>
       <View style={[styles.tick, { top: 0 }]}>
         <Text size="small" tone="inkSoft">
           {unit}
@@ -52,7 +52,7 @@ export function LevelNames({ levels }: { levels: readonly NamedLevel[] }) {
         aria-hidden
         style={[styles.name, side === 'left' ? styles.left : styles.right, { top: isBelow ? y + 2 : y - 20 }]}
       >
-        <View style={{ backgroundColor: theme.paper, opacity: 0.94 }}>
+        <View style={{ backgroundColor: theme.paper, opacity: 0.86 }}>
           <Text size="small" tone="fail" weight="strong" noWrap>
             {text}
           </Text>
@@ -63,9 +63,9 @@ export function LevelNames({ levels }: { levels: readonly NamedLevel[] }) {
 }
 
 const styles = StyleSheet.create({
-  axis: webStyle({ position: 'absolute', left: 0, top: 0, width: gutter, pointerEvents: 'none' }),
+  axis: webStyle({ position: 'absolute', left: 0, top: 0, pointerEvents: 'none' }),
   tick: { position: 'absolute', right: space.xs },
   name: webStyle({ position: 'absolute', pointerEvents: 'none', paddingLeft: space.xxs, paddingRight: space.xxs }),
-  left: { left: 0 },
+  left: { left: space.sm },
   right: { right: 0 },
 });

@@ -1,15 +1,11 @@
 import type { Candidate, RunStudy, Study } from '@/api/contracts/study';
 import type { SectionInput } from '@/api/geometry/section';
 
-/** A hot service gives heat off, a cold one takes it in: as the bare surface says. */
-export function natureOf({ candidates }: Study): 'hot' | 'cold' {
-  const judgedAt = candidates[0]?.heat.judgedAt;
-  return judgedAt && judgedAt.fluid < judgedAt.air ? 'cold' : 'hot';
-}
+/** A run's study, and in which ink it is drawn: as the service is, whatever the weather does. */
+export type StudiedRun = RunStudy & { nature: 'hot' | 'cold' };
 
 /** What is cut at each thickness, to be drawn. */
-export function sectionsOf({ body, assembly, study }: RunStudy): SectionInput[] {
-  const nature = natureOf(study);
+export function sectionsOf({ body, assembly, study, nature }: StudiedRun): SectionInput[] {
   return study.candidates.map(({ layerThicknesses }) => ({
     ...body,
     nature,
@@ -26,20 +22,21 @@ type DrawnKind = (typeof drawnKinds)[number];
 
 /** The surface under one condition set, at each thickness [°C]. */
 export type SurfaceCurve = { id: string; ink: 'hot' | 'cold'; values: (number | null)[] };
-export type SurfaceLevel = { id: string; kind: DrawnKind; name: string; value: number };
+/** A level by its name; `above` [K] is what it asks above the dew point. */
+export type SurfaceLevel = { id: string; kind: DrawnKind; name: string; above: number | null; value: number };
 
 const surfaceIn = ({ verdicts }: Candidate, kind: DrawnKind): number | null =>
   verdicts.find((verdict) => verdict.kind === kind)?.value ?? null;
 
 /** One for each condition set that a drawn limit uses; where no limit is drawn, the surface that the heat flow goes with. */
-export function curvesOf(study: Study): SurfaceCurve[] {
+export function curvesOf({ study, nature }: Pick<StudiedRun, 'study' | 'nature'>): SurfaceCurve[] {
   const curves = drawnKinds.flatMap((kind): SurfaceCurve[] => {
     const values = study.candidates.map((candidate) => surfaceIn(candidate, kind));
     if (values.every((value) => value === null)) return [];
     return [{ id: kind, ink: kind === 'touch' ? 'hot' : 'cold', values }];
   });
   if (curves.length > 0) return curves;
-  return [{ id: 'heat', ink: natureOf(study), values: study.candidates.map(({ heat }) => heat.surface) }];
+  return [{ id: 'heat', ink: nature, values: study.candidates.map(({ heat }) => heat.surface) }];
 }
 
 /** Each limit that can be drawn across, and the dew point below its margin. */
@@ -50,11 +47,18 @@ export function levelsOf({ candidates }: Study): SurfaceLevel[] {
       .find((one) => one.kind === kind && one.value !== null);
     if (!verdict || verdict.value === null) return [];
     if (kind === 'touch')
-      return verdict.limit === null ? [] : [{ id: kind, kind, name: 'touch limit', value: verdict.limit }];
+      return verdict.limit === null ? [] : [{ id: kind, kind, name: 'touch limit', above: null, value: verdict.limit }];
     const { value, margin, dewPoint } = verdict;
     if (dewPoint === null || margin === null) return [];
-    const least = { id: 'margin', kind, name: 'dew point and margin', value: value - margin };
-    return value - margin - dewPoint < 0.05 ? [dewLevel(dewPoint)] : [least, dewLevel(dewPoint)];
+    const least = value - margin;
+    const asked = { id: 'margin', kind, name: 'dew point', above: least - dewPoint, value: least };
+    return least - dewPoint < 0.05 ? [dewLevel(dewPoint)] : [asked, dewLevel(dewPoint)];
   });
 }
-const dewLevel = (value: number): SurfaceLevel => ({ id: 'dew-point', kind: 'dew-point', name: 'dew point', value });
+const dewLevel = (value: number): SurfaceLevel => ({
+  id: 'dew-point',
+  kind: 'dew-point',
+  name: 'dew point',
+  above: null,
+  value,
+});

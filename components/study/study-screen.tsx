@@ -6,6 +6,7 @@ import type { RunRow } from '@/components/run/run-row';
 import { useLayout } from '@/components/theme/use-layout';
 import { Screen } from '@/components/ui/screen';
 import { Stack } from '@/components/ui/stack';
+import { Text } from '@/components/ui/text';
 import { useMay } from '@/hooks/use-session';
 import { useSpecification } from '@/hooks/use-specification';
 import { useUnits } from '@/hooks/use-units';
@@ -14,15 +15,16 @@ import { firstSelected } from './choices';
 import { MainActions } from './main-actions';
 import { rowOf, standingOf } from './put-up';
 import { RunStudyView } from './run-study-view';
-import { assemblyText, runOver, runTitle } from './run-words';
+import { useRunHead } from './use-run-head';
+import { assemblyText, natureOf } from './run-words';
 import { StudySentence } from './study-sentence';
 import type { Neighbours } from './neighbours';
-import { NeighbourLinks } from './neighbour-links';
 
 type StudyScreenProps = { jobId: string; row: RunRow; runStudy: RunStudy; neighbours: Neighbours };
 
 /** A run with its study; on a phone the sentence and the decision stay in sight at the foot. */
-export function StudyScreen({ jobId, row, runStudy, neighbours }: StudyScreenProps) {
+export function StudyScreen({ jobId, row, neighbours, ...given }: StudyScreenProps) {
+  const runStudy = { ...given.runStudy, nature: natureOf(row) };
   const { units } = useUnits();
   const { isPhone } = useLayout();
   const mayEdit = useMay('edit-jobs');
@@ -33,7 +35,12 @@ export function StudyScreen({ jobId, row, runStudy, neighbours }: StudyScreenPro
   const handedDown = rowOf(runStudy, specification, row.run.serviceId);
   const standing = standingOf(runStudy, handedDown);
   const of = { jobId, run: row.run, runStudy, row: handedDown };
-  const title = runTitle(row, units);
+  const head = useRunHead({ jobId, row, neighbours });
+  const lead = (
+    <Text size={isPhone ? 'small' : 'body'} tone="inkSoft">
+      {assemblyText(runStudy, units)}
+    </Text>
+  );
   const foot = (
     <View style={{ flexGrow: 1, flexBasis: '100%' }}>
       <Stack gap="xs">
@@ -43,16 +50,8 @@ export function StudyScreen({ jobId, row, runStudy, neighbours }: StudyScreenPro
     </View>
   );
   return (
-    <Screen
-      title={title}
-      tabTitle={`${row.run.number} ${title}`}
-      over={runOver(row, units)}
-      lead={assemblyText(runStudy, units)}
-      back={{ href: { pathname: '/jobs/[job]/runs', params: { job: jobId } }, label: 'Runs' }}
-      aside={<NeighbourLinks jobId={jobId} neighbours={neighbours} />}
-      footer={isPhone ? foot : undefined}
-    >
-      <RunStudyView {...{ of, row, title, standing, selected, mayEdit }} onSelect={setChosen} />
+    <Screen {...head} lead={lead} footer={isPhone ? foot : undefined}>
+      <RunStudyView {...{ of, row, title: head.title, standing, selected, mayEdit }} onSelect={setChosen} />
     </Screen>
   );
 }

@@ -1,4 +1,3 @@
-import { limitWords } from '@/api/contracts/run-words';
 import type { RunStudy } from '@/api/contracts/study';
 import { wordsText } from '@/api/contracts/words-text';
 import type { TypeSize } from '@/components/theme/tokens';
@@ -8,6 +7,14 @@ import { useUnits } from '@/hooks/use-units';
 
 import { candidateName } from './candidate-words';
 import { leadAndRest } from './lead';
+
+const governs: Record<NonNullable<RunStudy['study']['governing']>, string> = {
+  touch: 'the touch limit',
+  'dew-point': 'the dew point',
+  'energy-code': 'the energy code',
+  'heat-flow': 'the heat-flow limit',
+  material: 'the material',
+};
 
 type StudySentenceProps = { runStudy: RunStudy; size?: TypeSize };
 
@@ -28,7 +35,7 @@ export function StudySentence({ runStudy: { study, used }, size = 'sentence' }: 
       {remedy && !stands ? (
         <Text size={size}>
           <Words tone="pass" weight="strong">{`${candidateName(remedy, units)} meets every limit`}</Words>
-          {study.governing ? `; what governs is ${limitWords[study.governing]}.` : '.'}
+          {study.governing ? `; ${governs[study.governing]} governs.` : '.'}
         </Text>
       ) : null}
     </Stack>

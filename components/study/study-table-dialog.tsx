@@ -4,13 +4,13 @@ import { Dialog } from '@/components/ui/dialog';
 import { Text } from '@/components/ui/text';
 import { useToast } from '@/components/ui/toast';
 import { useUnits } from '@/hooks/use-units';
-import type { RunStudy } from '@/api/contracts/study';
 
 import type { Standing } from './put-up';
 import { studyTable, tableNotes, tableText, type StudyTable } from './study-table';
+import type { StudiedRun } from './study-facts';
 
 type Row = StudyTable['rows'][number];
-type StudyTableDialogProps = { title: string; runStudy: RunStudy; standing: Standing; onClose: () => void };
+type StudyTableDialogProps = { title: string; runStudy: StudiedRun; standing: Standing; onClose: () => void };
 
 export function StudyTableDialog({ title, runStudy, standing, onClose }: StudyTableDialogProps) {
   const { units } = useUnits();

@@ -1,16 +1,16 @@
 import { show, showWithUnit, unitLabel, type UnitSystem } from '@/api/contracts/quantities';
 import { limitWords } from '@/api/contracts/run-words';
-import type { Candidate, RunStudy, Study } from '@/api/contracts/study';
+import type { Candidate } from '@/api/contracts/study';
 
 import { candidateName, heatKind, marksText } from './candidate-words';
 import { shortConditions } from './conditions-text';
 import { standingWords, type Standing } from './put-up';
-import { curvesOf } from './study-facts';
+import { curvesOf, type StudiedRun } from './study-facts';
 
 export type TableColumn = { key: string; label: string; unit?: string; numeric?: boolean };
 export type StudyTable = { columns: TableColumn[]; rows: { key: string; cells: string[] }[] };
 
-type Told = { runStudy: RunStudy; standing: Standing; units: UnitSystem };
+type Told = { runStudy: StudiedRun; standing: Standing; units: UnitSystem };
 type Column = TableColumn & { text: (candidate: Candidate, place: number) => string };
 
 /** The strip's numbers as rows and columns: the same for eyes, ears and clipboard. */
@@ -31,8 +31,8 @@ export const tableText = ({ columns, rows }: StudyTable): string =>
     .map((line) => line.join('\t'))
     .join('\n');
 
-function columnsOf({ runStudy: { study }, standing, units }: Told): Column[] {
-  const kind = heatKind(study.candidates[0]);
+function columnsOf({ runStudy, standing, units }: Told): Column[] {
+  const kind = heatKind(runStudy.study.candidates[0]);
   return [
     { key: 'name', label: 'Thickness', text: (candidate) => candidateName(candidate, units) },
     {
@@ -42,7 +42,7 @@ function columnsOf({ runStudy: { study }, standing, units }: Told): Column[] {
       numeric: true,
       text: ({ outsideDiameter }) => (outsideDiameter === null ? '' : show('dimension', outsideDiameter, { units })),
     },
-    ...surfaceColumns(study, units),
+    ...surfaceColumns(runStudy, units),
     {
       key: 'heat',
       label: 'Heat flow',
@@ -56,8 +56,8 @@ function columnsOf({ runStudy: { study }, standing, units }: Told): Column[] {
 }
 
 /** One for each line of the drawing, under the name of the limit that uses it. */
-function surfaceColumns(study: Study, units: UnitSystem): Column[] {
-  return curvesOf(study).map(({ id, values }) => ({
+function surfaceColumns(runStudy: StudiedRun, units: UnitSystem): Column[] {
+  return curvesOf(runStudy).map(({ id, values }) => ({
     key: id,
     label: id === 'touch' || id === 'dew-point' ? `Surface for ${limitWords[id]}` : 'Surface',
     unit: unitLabel('temperature', units),

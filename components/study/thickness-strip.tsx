@@ -2,9 +2,9 @@ import { useLayoutEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { unitLabel } from '@/api/contracts/quantities';
-import type { RunStudy } from '@/api/contracts/study';
 import { strip, type StripLayout } from '@/api/geometry/strip';
 import { StripPlot } from '@/components/diagram/strip-plot';
+import { space } from '@/components/theme/tokens';
 import { useLayout } from '@/components/theme/use-layout';
 import { webStyle } from '@/components/theme/web-style';
 import { Element } from '@/components/ui/element';
@@ -12,13 +12,14 @@ import { useUnits } from '@/hooks/use-units';
 
 import { candidateName, heatKind, heatText } from './candidate-words';
 import { standingWords, type Standing } from './put-up';
-import { StripColumn } from './strip-column';
+import { headroom, StripColumn } from './strip-column';
 import { columnText, levelText, stripFacts, type StripFacts } from './strip-facts';
-import { gutter, LevelNames, StripAxis } from './strip-frame';
+import { gutters, LevelNames, StripAxis } from './strip-frame';
 import { placeAfter } from './strip-keys';
+import type { StudiedRun } from './study-facts';
 
 type ThicknessStripProps = {
-  runStudy: RunStudy;
+  runStudy: StudiedRun;
   standing: Standing;
   selected: number;
   onSelect: (place: number) => void;
@@ -33,14 +34,16 @@ const rooms = {
 export function ThicknessStrip({ runStudy, standing, selected, onSelect }: ThicknessStripProps) {
   const { isPhone } = useLayout();
   const { units } = useUnits();
-  const left = isPhone ? 0 : gutter;
+  const left = isPhone ? 0 : gutters[units];
   const [width, setWidth] = useState(isPhone ? 358 : 800);
   const facts = stripFacts(runStudy, units);
   const layout = strip(facts.input, { width: width - left, ...rooms[isPhone ? 'phone' : 'wide'] });
   const heatUnit = unitLabel(heatKind(runStudy.study.candidates[0]), units);
   return (
     <View style={styles.whole} onLayout={({ nativeEvent }) => setWidth(nativeEvent.layout.width)}>
-      {isPhone ? null : <StripAxis layout={layout} unit={unitLabel('temperature', units)} heatUnit={heatUnit} />}
+      {isPhone ? null : (
+        <StripAxis layout={layout} width={left} unit={unitLabel('temperature', units)} heatUnit={heatUnit} />
+      )}
       <View style={{ marginLeft: left }}>
         <Columns {...{ runStudy, standing, selected, onSelect, layout, facts }} />
         <LevelNames levels={namedLevels(facts, { layout, units, isPhone })} />
@@ -64,6 +67,7 @@ function Columns({ runStudy, standing, selected, onSelect, layout, facts }: Colu
     onSelect(place);
     scroll.current?.querySelectorAll<HTMLElement>('[role="radio"]')[place]?.focus({ preventScroll: true });
   };
+  const above = Math.min(...layout.columns.map(({ drawing, drawingTop }) => drawingTop + drawing.box.y)) - headroom;
   const inks = Object.fromEntries(facts.curves.map(({ id, ink }) => [id, ink]));
   const digits = units === 'SI' || facts.levels.some(({ kind }) => kind === 'dew-point') ? 1 : 0;
   return (
@@ -77,12 +81,13 @@ function Columns({ runStudy, standing, selected, onSelect, layout, facts }: Colu
             text={(value) => value.toFixed(digits).replace('-', '−')}
           />
         </View>
-        <View role="radiogroup" aria-label="Thickness" style={styles.row}>
+        <View role="radiogroup" aria-label="Thickness" style={[styles.row, { marginTop: above }]}>
           {candidates.map((candidate, place) => (
             <StripColumn
               key={candidate.names.join() || 'bare'}
               placed={layout.columns[place]!}
-              base={layout.base}
+              base={layout.base - above}
+              above={above}
               pitch={layout.pitch}
               candidate={candidate}
               name={candidateName(candidate, units)}
@@ -121,7 +126,7 @@ const namedLevels = ({ levels }: StripFacts, { layout, units, isPhone }: Named) 
 
 const styles = StyleSheet.create({
   whole: { minWidth: 0 },
-  scroll: webStyle({ overflowX: 'auto', overflowY: 'hidden', scrollSnapType: 'x proximity', paddingBottom: 4 }),
+  scroll: webStyle({ overflowX: 'auto', overflowY: 'hidden', scrollSnapType: 'x proximity', paddingBottom: space.xxs }),
   plot: webStyle({ position: 'absolute', left: 0, top: 0, pointerEvents: 'none' }),
   row: { flexDirection: 'row', alignItems: 'stretch' },
 });

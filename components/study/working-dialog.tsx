@@ -22,7 +22,7 @@ type WorkingDialogProps = { of: { jobId: string; runId: string }; asked: Working
 export function WorkingDialog({ of, asked, onClose }: WorkingDialogProps) {
   const { working, problem, reload } = useWorking(of, asked);
   return (
-    <Dialog title={working?.title ?? 'The working'} width="wide" onClose={onClose}>
+    <Dialog title={working?.title ?? problem?.title ?? 'The working'} width="wide" onClose={onClose}>
       {problem ? <ProblemWords problem={problem} onRetry={reload} /> : null}
       {working ? <Steps working={working} /> : null}
       {!working && !problem ? <Loading label="The working" shape="list" /> : null}

@@ -24,7 +24,7 @@ it('draws every section at one scale and on one base line', () => {
   expect(scales.size).toBe(1);
   for (const { drawing, drawingTop } of columns)
     expect(drawingTop + drawing.box.y + drawing.box.height).toBeCloseTo(base, 0);
-  expect(columns[3]!.drawing).toEqual(sectionToScale(sections[3]!, [...scales][0]!));
+  expect(columns[3]!.drawing).toEqual(sectionToScale(sections[3]!, [...scales][0]!, columns.at(-1)!.drawing.size - 3));
 });
 
 it('lets no section be wider than its column or taller than its room', () => {
