@@ -29,12 +29,8 @@ export const retarderWords: Record<BuildUpInput['vapourRetarder'], string> = {
 
 export const nameIn = (rows: readonly Named[], id: string): string => rows.find((row) => row.id === id)?.name ?? '';
 
-/** A material or finish without what stands in brackets or after a comma: for columns and lines of layers. */
-export const shortName = (name: string): string =>
-  name
-    .replace(/ ?\([^)]*\)/g, '')
-    .split(/, |: | \/ /)[0]!
-    .trim();
+/** A material or finish without what stands in brackets: for columns and lines of layers. */
+export const shortName = (name: string): string => name.replace(/ ?\([^)]*\)/g, '').trim();
 
 /** DN in SI, NPS in inch-pound: the same size under its two names. */
 export function dnText(dn: number, { units, sizes }: Pick<CoveringNames, 'units' | 'sizes'>): string {

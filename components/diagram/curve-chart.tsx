@@ -49,9 +49,9 @@ export function CurveChart({ label, curves, across, up, digits }: CurveChartProp
       <Text {...words} x={frame.left + 6} y={frame.top + 8}>
         {up}
       </Text>
-      {plot.curves.map(({ path, dots }, index) => (
-        <Curve key={path} path={path} dots={dots} isUsed={index === 0} />
-      )).reverse()}
+      {plot.curves
+        .map(({ path, dots }, index) => <Curve key={path} path={path} dots={dots} isUsed={index === 0} />)
+        .reverse()}
     </Svg>
   );
 }
@@ -63,9 +63,23 @@ function Curve({ path, dots, isUsed }: CurveProps) {
   const ink = isUsed ? theme.oxide : theme.inkSoft;
   return (
     <G>
-      <Path d={path} fill="none" stroke={ink} strokeWidth={isUsed ? 2.5 : 1} strokeDasharray={isUsed ? undefined : '4 3'} />
+      <Path
+        d={path}
+        fill="none"
+        stroke={ink}
+        strokeWidth={isUsed ? 2.5 : 1}
+        strokeDasharray={isUsed ? undefined : '4 3'}
+      />
       {dots.map(({ x, y }) => (
-        <Circle key={x} cx={x} cy={y} r={isUsed ? 4 : 2} fill={isUsed ? theme.sheet : ink} stroke={ink} strokeWidth={isUsed ? 2 : 1} />
+        <Circle
+          key={x}
+          cx={x}
+          cy={y}
+          r={isUsed ? 4 : 2}
+          fill={isUsed ? theme.sheet : ink}
+          stroke={ink}
+          strokeWidth={isUsed ? 2 : 1}
+        />
       ))}
     </G>
   );

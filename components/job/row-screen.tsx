@@ -24,13 +24,16 @@ type RowScreenProps<Row extends Stored> = {
   /** above the title */
   overOf?: (row: Row) => string;
   back: Back;
+  /** no list stands beside it, however wide the screen */
+  isAlone?: boolean;
   children: (row: Row) => ReactNode;
 };
 
 /** One row of a list: it may be on its way, or deleted by someone else meanwhile. */
 export function RowScreen<Row extends Stored>(props: RowScreenProps<Row>) {
-  const { noun, id, rows, problem, onRetry, titleOf, overOf, children } = props;
-  const back = useBack(props.back);
+  const { noun, id, rows, problem, onRetry, titleOf, overOf, isAlone, children } = props;
+  const beside = useBack(props.back);
+  const back = isAlone ? props.back : beside;
   if (problem && !rows) return <ProblemScreen problem={problem} onRetry={onRetry} back={back} />;
   if (!rows) return <LoadingScreen title={props.back.label} back={back} shape="form" />;
   const row = rows.find((one) => one.id === id);

@@ -32,8 +32,10 @@ export function jobPlaces({ job, pathname, flags }: { job: string; pathname: str
 /** The places outside of any job. */
 export const generalPlaces = ({ pathname, inJob }: { pathname: string; inJob: boolean }): Place[] => [
   { label: inJob ? 'All jobs' : 'Jobs', href: '/jobs', current: !inJob && isAt(pathname, '/jobs') },
+  { label: 'Contacts', href: '/contacts', current: isAt(pathname, '/contacts') },
   { label: 'Library', href: '/library', current: isAt(pathname, '/library') },
 ];
 
 /** A detail below a place has its own way back and its own foot: there a phone needs no bar. */
-export const isDetail = (pathname: string) => /^\/(jobs\/[^/]+\/[^/]+\/.+|library\/.+\/.+|jobs\/new)$/.test(pathname);
+export const isDetail = (pathname: string) =>
+  /^\/(jobs\/[^/]+\/[^/]+\/.+|jobs\/[^/]+\/edit|library\/.+\/.+|contacts\/.+|jobs\/new)$/.test(pathname);

@@ -13,7 +13,7 @@ const sizes = [
   { dn: 200, nominal: 'NPS 8' },
 ];
 const materials = [
-  { id: 'std/mf_pipe', name: 'Mineral fibre pipe insulation (glass or rock/slag wool), preformed' },
+  { id: 'std/mf_pipe', name: 'Mineral fibre pipe section (glass or rock wool)' },
   { id: 'std/cellular_glass', name: 'Cellular glass' },
 ];
 const layer = (materialId: string, thickness: 'in:2' | 'in:1.5' | null) => ({ materialId, thickness, installed: null });
@@ -37,8 +37,8 @@ describe('a band of sizes', () => {
 describe('layers', () => {
   it('name thickness and material in the units of the reader', () => {
     const inside = layer('std/mf_pipe', 'in:2');
-    expect(layerText(inside, { units: 'SI', materials })).toBe('51 mm mineral fibre pipe insulation');
-    expect(layerText(inside, { units: 'IP', materials })).toBe('2 in mineral fibre pipe insulation');
+    expect(layerText(inside, { units: 'SI', materials })).toBe('51 mm mineral fibre pipe section');
+    expect(layerText(inside, { units: 'IP', materials })).toBe('2 in mineral fibre pipe section');
   });
 
   it('say what is left to be found', () => {
@@ -51,13 +51,13 @@ describe('layers', () => {
 
   it('name a material once while it repeats', () => {
     const two = [layer('std/mf_pipe', 'in:2'), layer('std/mf_pipe', 'in:2'), layer('std/cellular_glass', 'in:2')];
-    expect(materialsText(two, materials)).toBe('Mineral fibre pipe insulation, then Cellular glass');
+    expect(materialsText(two, materials)).toBe('Mineral fibre pipe section, then Cellular glass');
   });
 });
 
-it('shortens a name to what it is called, without what it is made of', () => {
-  expect(shortName('Mineral fibre blanket / duct wrap (flexible fibrous glass)')).toBe('Mineral fibre blanket');
-  expect(shortName('PVC jacket or fitting cover')).toBe('PVC jacket or fitting cover');
+it('leaves out of a name what stands in brackets', () => {
+  expect(shortName('All-service jacket (ASJ), white paper outside')).toBe('All-service jacket, white paper outside');
+  expect(shortName('Cellular glass')).toBe('Cellular glass');
 });
 
 it('reads no place as everywhere', () => {
