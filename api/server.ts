@@ -2,7 +2,8 @@ import path from 'node:path';
 import { Pool } from 'pg';
 
 import { createApp } from '@/api/app';
-import { readConfig, type Config } from '@/api/config';
+import { begin, giveUp } from '@/api/begin';
+import type { Config } from '@/api/config';
 import { createLogger, requestLogger } from '@/api/logger';
 import { startQueue } from '@/api/queue/queue';
 import { sessions } from '@/api/routes/middleware/session';
@@ -28,7 +29,7 @@ async function main(config: Config): Promise<void> {
     web: config.webFolder && path.resolve(config.webFolder),
   });
   const server = app.listen(port, host, (error) => {
-    if (error) fail(portTaken(error) ? new Error(`Port ${port} is in use: choose another with PORT.`) : error);
+    if (error) giveUp(portTaken(error) ? new Error(`Port ${port} is in use: choose another with PORT.`) : error);
     logger.info({ host, port }, 'listening');
   });
   onStop(logger, async () => {
@@ -44,13 +45,4 @@ async function main(config: Config): Promise<void> {
 
 const portTaken = (error: Error) => 'code' in error && error.code === 'EADDRINUSE';
 
-function fail(error: unknown): never {
-  console.error(error instanceof Error ? error.message : error);
-  process.exit(1);
-}
-
-try {
-  main(readConfig(process.env)).catch(fail);
-} catch (error) {
-  fail(error);
-}
+begin(main);

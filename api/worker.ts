@@ -1,6 +1,7 @@
 import { systemClock } from '@/api/adapters/clock';
 import { createSmtp } from '@/api/adapters/smtp';
-import { readConfig, type Config } from '@/api/config';
+import { begin } from '@/api/begin';
+import type { Config } from '@/api/config';
 import { createLogger } from '@/api/logger';
 import { startQueue } from '@/api/queue/queue';
 import { workOnRendering } from '@/api/queue/render-worker';
@@ -29,13 +30,4 @@ async function main(config: Config): Promise<void> {
   });
 }
 
-function fail(error: unknown): never {
-  console.error(error instanceof Error ? error.message : error);
-  process.exit(1);
-}
-
-try {
-  main(readConfig(process.env)).catch(fail);
-} catch (error) {
-  fail(error);
-}
+begin(main);
