@@ -40,11 +40,15 @@ export function solve(heatCase: HeatCase): HeatResult {
   };
 }
 
+/** A difference [K] below which temperatures are equal: no thermometer and no double beside 273 K could tell. */
+const nothing = 1e-12;
+
 function stateOf(heatCase: HeatCase, wall: Wall, exchange: Exchange): Balance {
   const { operatingTemperature, airTemperature } = heatCase;
   const pipe = operatingTemperature - airTemperature;
   const { offset } = exchange;
-  if (pipe === 0 && offset === 0) return { flow: 0, difference: 0, iterations: 0, isJump: false };
+  if (Math.abs(pipe) < nothing && Math.abs(offset) < nothing)
+    return { flow: 0, difference: 0, iterations: 0, isJump: false };
   if (wall.layers.length === 0) {
     return { flow: wall.area * exchange.flux(pipe), difference: pipe, iterations: 0, isJump: false };
   }
