@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
-import { flagSchema } from './judgement';
 import { snapshotSchema } from './revision';
+import { wordsSchema } from './study';
 
 /** What a client sees through a private link: only what was sent to them. */
 export const linkViewSchema = z.object({
@@ -26,7 +26,14 @@ export const linkViewSchema = z.object({
     })
     .extend({
       job: snapshotSchema.shape.job.pick({ number: true, name: true, site: true, scope: true, codeEdition: true }),
-      flags: z.array(flagSchema.extend({ runNumber: z.string() })),
+      /** numbered and grouped as in the document */
+      clarifications: z.array(
+        z.object({
+          number: z.number().int(),
+          title: z.string(),
+          entries: z.array(z.object({ runs: z.string(), words: wordsSchema })),
+        }),
+      ),
       conditions: z.array(z.object({ place: z.string(), words: z.array(z.string()) })),
     })
     .nullable(),

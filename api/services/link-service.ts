@@ -2,6 +2,7 @@ import type { Clock } from '@/api/adapters/clock';
 import type { LinkView } from '@/api/contracts/link';
 import { snapshotSchema, type Snapshot } from '@/api/contracts/revision';
 import { takeoffFileName } from '@/api/documents/file-name';
+import { clarificationsOf } from '@/api/documents/takeoff/clarifications';
 import { conditionsInWords } from '@/api/documents/takeoff/conditions-in-words';
 import { AppError } from '@/api/errors';
 import type { LinkDoors } from '@/db/repositories/link-doors';
@@ -44,7 +45,6 @@ const noSuchLink = () => new AppError('not-found', 'This link does not exist, or
 function viewOf(snapshot: Snapshot): NonNullable<LinkView['sent']> {
   const { letter, frozenAt, validUntil, timeZone, preparedBy, letterhead, schedule, takeoff, cautions } = snapshot;
   const { number, name, site, scope, codeEdition } = snapshot.job;
-  const numbers = new Map(snapshot.runs.map((run) => [run.id, run.number]));
   return {
     letter,
     frozenAt,
@@ -58,7 +58,11 @@ function viewOf(snapshot: Snapshot): NonNullable<LinkView['sent']> {
     method: snapshot.method,
     engineVersion: snapshot.engineVersion,
     job: { number, name, site, scope, codeEdition },
-    flags: snapshot.flags.map((flag) => ({ ...flag, runNumber: numbers.get(flag.runId) ?? '' })),
+    clarifications: clarificationsOf(snapshot).map(({ number: place, title, entries }) => ({
+      number: place,
+      title,
+      entries,
+    })),
     conditions: conditionsInWords(snapshot),
   };
 }

@@ -1,22 +1,20 @@
 import { StyleSheet, View } from 'react-native';
 
 import type { LinkView } from '@/api/contracts/link';
-import { flagWords } from '@/api/contracts/run-words';
 import { wordsText } from '@/api/contracts/words-text';
 import { ScheduleList } from '@/components/schedule/schedule-list';
 import { TakeoffTables } from '@/components/takeoff/takeoff-tables';
 import { measure, space } from '@/components/theme/tokens';
 import { Disclosure } from '@/components/ui/disclosure';
 import { Heading } from '@/components/ui/heading';
-import { Mark } from '@/components/ui/mark';
 import { Stack } from '@/components/ui/stack';
-import { Text } from '@/components/ui/text';
+import { Text, Words } from '@/components/ui/text';
 
 export type Sent = NonNullable<LinkView['sent']>;
 
 /** The body of what was sent: scope, clarifications, schedule, quantities, conditions, cautions. The document's units. */
 export function SentTakeoff({ sent }: { sent: Sent }) {
-  const { job, flags, schedule, takeoff, conditions, cautions } = sent;
+  const { job, clarifications, schedule, takeoff, conditions, cautions } = sent;
   return (
     <Stack gap="lg">
       {job.scope ? (
@@ -24,7 +22,7 @@ export function SentTakeoff({ sent }: { sent: Sent }) {
           <Text size="lead">{job.scope}</Text>
         </View>
       ) : null}
-      {flags.length > 0 ? <Clarifications flags={flags} /> : null}
+      {clarifications.length > 0 ? <Clarifications clarifications={clarifications} /> : null}
       <Part title="Schedule of insulation">
         <ScheduleList rows={schedule.rows} units="SI" />
       </Part>
@@ -63,22 +61,20 @@ const Part = ({ title, children }: { title: string; children: React.ReactNode })
   </Stack>
 );
 
-function Clarifications({ flags }: { flags: Sent['flags'] }) {
+function Clarifications({ clarifications }: Pick<Sent, 'clarifications'>) {
+  const count = clarifications.length;
   return (
-    <Part title={flags.length === 1 ? 'One point to decide' : `${flags.length} points to decide`}>
+    <Part title={count === 1 ? 'One point to decide' : `${count} points to decide`}>
       <View role="list" style={styles.text}>
-        {flags.map((flag, index) => (
-          <View role="listitem" key={`${flag.runNumber} ${flag.kind}`} style={styles.flag}>
-            <Text numeric tone="inkSoft">{`${index + 1}.`}</Text>
-            <View style={styles.words}>
-              <Mark
-                verdict={flag.kind === 'hold' || flag.verdict?.state === 'marginal' ? 'caution' : 'fail'}
-                words={`${flag.runNumber}, ${flagWords[flag.kind]}`}
-                size="body"
-                strong
-              />
-              <Text>{wordsText(flag.words, 'SI')}</Text>
-            </View>
+        {clarifications.map(({ number, title, entries }) => (
+          <View role="listitem" key={number} style={styles.point}>
+            <Text weight="strong">{`${number}. ${title}`}</Text>
+            {entries.map(({ runs, words }) => (
+              <Text key={runs}>
+                <Words tone="inkSoft" numeric>{`${runs}: `}</Words>
+                {wordsText(words, 'SI')}
+              </Text>
+            ))}
           </View>
         ))}
       </View>
@@ -88,6 +84,5 @@ function Clarifications({ flags }: { flags: Sent['flags'] }) {
 
 const styles = StyleSheet.create({
   text: { maxWidth: measure, gap: space.xs },
-  flag: { flexDirection: 'row', gap: space.xs },
-  words: { flex: 1, minWidth: 0 },
+  point: { gap: space.xxs },
 });

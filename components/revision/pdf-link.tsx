@@ -1,9 +1,11 @@
 import { useTheme } from '@/components/theme/use-theme';
-import { buttonShape, toneStyle } from '@/components/ui/button';
+import { buttonShape, toneStyle, type ButtonTone } from '@/components/ui/button';
 import { Element } from '@/components/ui/element';
 
-/** Opens a PDF from the server in a tab of its own. */
-export function PdfLink({ path, label, download }: { path: string; label: string; download?: boolean }) {
+type PdfLinkProps = { path: string; label: string; tone?: ButtonTone; download?: boolean };
+
+/** Opens a PDF from the server in a tab of its own, or saves it. */
+export function PdfLink({ path, label, tone = 'quiet', download }: PdfLinkProps) {
   const theme = useTheme();
   return (
     <Element
@@ -12,7 +14,7 @@ export function PdfLink({ path, label, download }: { path: string; label: string
       target={download ? undefined : '_blank'}
       rel="noreferrer"
       download={download || undefined}
-      style={[buttonShape.button, toneStyle(theme, 'quiet')]}
+      style={[buttonShape.button, toneStyle(theme, tone)]}
     >
       {label}
     </Element>
