@@ -18,7 +18,9 @@ config.resolver.resolveRequest = (context, name, platform) => {
   if (/[\\/]zod[\\/]/.test(context.originModulePath) && /(^|\/)locales\/index\.js$/.test(name))
     return { type: 'empty' };
   const found = (upstream ?? context.resolveRequest)(context, name, platform);
-  return found.type === 'sourceFile' && isUnused(found.filePath) ? { ...found, filePath: standIn } : found;
+  return !context.dev && found.type === 'sourceFile' && isUnused(found.filePath)
+    ? { ...found, filePath: standIn }
+    : found;
 };
 
 // Development only: /api goes through the dev server, so the browser sees one origin.

@@ -25,7 +25,7 @@ export function SessionEnded({ email }: { email: string }) {
       footer={<Button label="Leave without saving" onPress={leave} />}
     >
       <Text>Sign in again: what you have not saved is still here.</Text>
-      <SignInForm email={email} onSignIn={again} />
+      <SignInForm email={email} focused onSignIn={again} />
     </Dialog>
   );
 }

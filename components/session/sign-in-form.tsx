@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { useEffect, useId } from 'react';
 import { useForm, useFormState } from 'react-hook-form';
 import { StyleSheet } from 'react-native';
 
@@ -15,17 +15,22 @@ import { Notice } from '@/components/ui/notice';
 type SignInFormProps = {
   /** who was here before */
   email?: string;
+  /** begins in the first empty field; not on a phone, where a keyboard would come up unasked */
+  focused?: boolean;
   onSignIn: (input: SignIn) => Promise<unknown>;
 };
 
 /** E-mail and password, as a password manager knows them. A refusal keeps the e-mail and empties the password. */
-export function SignInForm({ email = '', onSignIn }: SignInFormProps) {
+export function SignInForm({ email = '', focused = false, onSignIn }: SignInFormProps) {
   const id = useId();
   const { control, handleSubmit, setError, resetField, setFocus } = useForm({
     resolver: plainResolver(signInSchema),
     defaultValues: { email, password: '' },
   });
   const { errors, isSubmitting } = useFormState({ control });
+  useEffect(() => {
+    if (focused) setFocus(email ? 'password' : 'email');
+  }, [focused, email, setFocus]);
   const submit = handleSubmit((input) =>
     onSignIn(input).catch((error: unknown) => {
       const problem = problemOf(error);

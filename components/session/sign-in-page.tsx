@@ -28,29 +28,36 @@ export function SignInPage({ onSignIn }: { onSignIn: (input: SignIn) => Promise<
               <Heading level={1}>Sign in</Heading>
               <Text tone="inkSoft">Thickness, takeoff and the document that your client reads.</Text>
             </View>
-            <SignInForm onSignIn={onSignIn} />
+            <SignInForm onSignIn={onSignIn} focused={!isPhone} />
           </View>
         </View>
-        {isPhone ? null : <Picture />}
+        {isPhone ? <Below /> : <Beside />}
       </View>
     </Main>
   );
 }
 
-function Picture() {
+function Beside() {
   const theme = useTheme();
   return (
-    <View style={[styles.picture, { borderLeftColor: theme.rule }]}>
+    <View style={[styles.beside, { borderLeftColor: theme.rule }]}>
       <CutPipe size={720} />
     </View>
   );
 }
 
+/** What room a phone leaves, with the upper edge of the same drawing. */
+const Below = () => (
+  <View style={styles.below}>
+    <CutPipe size={560} />
+  </View>
+);
+
 const styles = StyleSheet.create({
   page: webStyle({ flex: 1, minHeight: '100%', overflowY: 'auto' }),
-  phone: { flexDirection: 'column', paddingHorizontal: space.md, paddingTop: space.lg, paddingBottom: space.xl },
+  phone: { flexDirection: 'column', paddingHorizontal: space.md, paddingTop: space.lg },
   wide: { flexDirection: 'row' },
-  top: { gap: space.xxl },
+  top: { gap: space.xxl, flexShrink: 0 },
   left: webStyle({
     width: 'min(50%, 560px)',
     padding: space.xl,
@@ -67,7 +74,7 @@ const styles = StyleSheet.create({
     alignSelf: 'center',
   }),
   words: { gap: space.xxs },
-  picture: webStyle({
+  beside: webStyle({
     flex: 1,
     overflow: 'hidden',
     justifyContent: 'center',
@@ -75,5 +82,14 @@ const styles = StyleSheet.create({
     paddingLeft: space.xxl,
     borderLeftWidth: hairline,
     borderLeftStyle: 'solid',
+  }),
+  below: webStyle({
+    flex: 1,
+    minHeight: 0,
+    overflow: 'hidden',
+    alignItems: 'center',
+    marginTop: space.xxl,
+    marginLeft: -space.md,
+    marginRight: -space.md,
   }),
 });

@@ -4,9 +4,9 @@
 const unused = [
   // navigators and screens with a look of their own: Thickset draws its shell around Slot, its own problems and its own "not found"
   'expo-router/build/layouts/(Tabs|experimental-stack|stack-utils)\\b',
-  'expo-router/build/(fork/native-stack|native-tabs|split-view|modal|standard-navigation)/',
+  'expo-router/build/(fork/native-stack|split-view|modal|standard-navigation)/',
   'expo-router/build/react-navigation/(bottom-tabs|native-stack|elements|drawer|stack|material-top-tabs)/',
-  'expo-router/build/link/preview/(HrefPreview|native|PreviewRouteContext)\\b',
+  'expo-router/build/link/preview/(HrefPreview|native)\\b',
   'expo-router/build/views/(Sitemap|Toast|ErrorBoundary|Unmatched)\\.js',
   'react-native-screens/',
   // animation, virtual lists, and controls: the kit has the browser's own
