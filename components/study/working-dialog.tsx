@@ -4,16 +4,15 @@ import type { Working } from '@/api/contracts/study';
 import { hairline, radius, space } from '@/components/theme/tokens';
 import { useTheme } from '@/components/theme/use-theme';
 import { Dialog } from '@/components/ui/dialog';
-import { FactList } from '@/components/ui/fact-list';
 import { Heading } from '@/components/ui/heading';
 import { Loading } from '@/components/ui/loading';
 import { ProblemWords } from '@/components/ui/problem-words';
 import { Stack } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
-import { useUnits } from '@/hooks/use-units';
 import { useWorking, type WorkingAsked } from '@/hooks/use-study';
-import { wordsText } from '@/api/contracts/words-text';
 
+import { Symbols } from './symbols';
+import { WorkingInputs } from './working-inputs';
 import { EngineWords } from './words';
 
 type WorkingDialogProps = { of: { jobId: string; runId: string }; asked: WorkingAsked; onClose: () => void };
@@ -50,12 +49,13 @@ function Steps({ working }: { working: Working }) {
 
 function Step({ step, number }: { step: Working['steps'][number]; number: number }) {
   const theme = useTheme();
-  const { units } = useUnits();
   return (
     <Stack gap="xs">
       <Heading level={3}>{`${number}. ${step.title}`}</Heading>
       <View style={[styles.equation, { backgroundColor: theme.paper, borderColor: theme.rule }]}>
-        <Text size="lead">{step.equation}</Text>
+        <Text size="lead">
+          <Symbols>{step.equation}</Symbols>
+        </Text>
         <Text numeric>
           <EngineWords words={step.filled} />
         </Text>
@@ -63,16 +63,7 @@ function Step({ step, number }: { step: Working['steps'][number]; number: number
           <EngineWords words={step.result} />
         </Text>
       </View>
-      {step.inputs.length > 0 ? (
-        <FactList
-          termWidth={64}
-          facts={step.inputs.map(({ symbol, meaning, value, source }) => ({
-            term: symbol,
-            value: `${wordsText(value, units)}: ${meaning}`,
-            note: source,
-          }))}
-        />
-      ) : null}
+      {step.inputs.length > 0 ? <WorkingInputs inputs={step.inputs} /> : null}
       {step.source ? (
         <Text size="small" tone="inkSoft">
           {step.source}
