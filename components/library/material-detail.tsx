@@ -1,7 +1,7 @@
 import type { LibraryCurve, LibraryMaterial, LibrarySeries } from '@/api/contracts/library';
 import { inUnits, show, unitLabel } from '@/api/contracts/quantities';
 import { thicknessText } from '@/api/contracts/words-text';
-import { CurveChart } from '@/components/diagram/curve-chart';
+import { DrawnCurves } from '@/components/drawing/drawn';
 import { DataTable, type Column } from '@/components/ui/data-table';
 import { Disclosure } from '@/components/ui/disclosure';
 import { FactList } from '@/components/ui/fact-list';
@@ -71,7 +71,7 @@ function Curves({ material: { name, curve, otherCurves } }: { material: LibraryM
   return (
     <Stack gap="sm">
       <Heading>Conductivity</Heading>
-      <CurveChart
+      <DrawnCurves
         label={`Conductivity of ${name} over mean temperature; the numbers follow in tables`}
         curves={shown}
         across={`mean temperature ${unitLabel('temperature', units)}`}

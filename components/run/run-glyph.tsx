@@ -1,5 +1,5 @@
 import type { JudgedRun } from '@/api/contracts/judgement';
-import { Section } from '@/components/diagram/section';
+import { DrawnSection } from '@/components/drawing/drawn';
 
 /** The run's section, small; nothing while it is judged, or where there is nothing to cut. */
 export function RunGlyph({ judged }: { judged: JudgedRun | undefined }) {
@@ -9,5 +9,5 @@ export function RunGlyph({ judged }: { judged: JudgedRun | undefined }) {
     materialId: assembly?.layers[index]?.materialId ?? '',
     thickness,
   }));
-  return <Section drawn={{ ...body, nature, layers }} size={28} />;
+  return <DrawnSection drawn={{ ...body, nature, layers }} size={28} />;
 }

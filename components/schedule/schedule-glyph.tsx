@@ -1,7 +1,7 @@
 import type { ScheduleRow } from '@/api/contracts/schedule';
-import { Section } from '@/components/diagram/section';
+import { DrawnSection } from '@/components/drawing/drawn';
 
 /** The section of a schedule's row, to scale. */
 export function ScheduleGlyph({ row: { section }, size }: { row: ScheduleRow; size: 28 | 40 | 120 }) {
-  return section ? <Section drawn={section} size={size} /> : null;
+  return section ? <DrawnSection drawn={section} size={size} /> : null;
 }

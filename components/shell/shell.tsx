@@ -1,8 +1,9 @@
 import { useGlobalSearchParams, usePathname } from 'expo-router';
-import type { ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import type { Session } from '@/api/contracts/session';
+import { fetchDrawings } from '@/components/drawing/drawn';
 import { useLayout } from '@/components/theme/use-layout';
 import { Main } from '@/components/ui/main';
 import { useJob } from '@/hooks/use-job';
@@ -17,6 +18,7 @@ type ShellProps = { session: Session; children: ReactNode };
 
 /** What stands around every screen of a member. */
 export function Shell(props: ShellProps) {
+  useEffect(fetchDrawings, []);
   const { job } = useGlobalSearchParams();
   return typeof job === 'string' ? <JobShell job={job} {...props} /> : <PlainShell {...props} />;
 }

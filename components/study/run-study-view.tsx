@@ -15,9 +15,9 @@ import { MainActions } from './main-actions';
 import { OtherActions } from './other-actions';
 import type { Standing } from './put-up';
 import { StudySentence } from './study-sentence';
-import { ThicknessStrip } from './thickness-strip';
 import { WhyNotThinner } from './why-not-thinner';
 import { WorkingDialog } from './working-dialog';
+import { DrawnStrip } from '@/components/drawing/drawn';
 import type { RunRow } from '@/components/run/run-row';
 
 type RunStudyViewProps = {
@@ -41,7 +41,7 @@ export function RunStudyView({ of, row, title, standing, selected, onSelect, may
       {isPhone ? null : <StudySentence runStudy={runStudy} />}
       <CurveKey runStudy={runStudy} />
       <View style={isPhone ? styles.bleed : null}>
-        <ThicknessStrip {...{ runStudy, standing, selected, onSelect }} />
+        <DrawnStrip {...{ runStudy, standing, selected, onSelect }} />
       </View>
       {isPhone ? (
         <OtherActions of={of} title={title} standing={standing} mayEdit={mayEdit} />
