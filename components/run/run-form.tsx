@@ -75,7 +75,9 @@ export function RunForm({ jobId, run, initial, lookups, onSaved, onCancel, actio
       <Select label="Kind" value={kind} options={shapeOptions} onChange={changeShape} />
       {parts.map(({ part, title }) => (
         <View key={part} role="group" aria-label={title} style={styles.part}>
-          <Heading level={3}>{title}</Heading>
+          <Heading level={2} size="body">
+            {title}
+          </Heading>
           <View style={styles.fields}>
             {fieldsOf(part, kind).map((field) => (
               <View key={field.key} style={isBroad(field) ? styles.broad : styles.field}>

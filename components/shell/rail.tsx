@@ -18,7 +18,7 @@ export type ShellPlaces = { jobName?: string; inJob: Place[]; general: Place[] }
 export function Rail({ jobName, inJob, general, session }: ShellPlaces & { session: Session }) {
   const theme = useTheme();
   return (
-    <View style={[styles.rail, { borderRightColor: theme.rule }]}>
+    <View role="banner" style={[styles.rail, { borderRightColor: theme.rule }]}>
       <Link href="/jobs" asChild>
         <View style={styles.brand}>
           <Brand />
