@@ -11,7 +11,8 @@ const refusal = ({ code, words }: { code: number; words: string }) =>
   Object.assign(new Error(words), { responseCode: code });
 
 /** A real SMTP server on loopback that answers as it is told, and keeps what it took byte for byte. */
-export async function openPostOffice(answers: Answer[] = []) {
+export async function openPostOffice(answers: Answer[] = [], wanted = 0) {
+  const pause = createPause();
   const taken: Taken[] = [];
   const next = (at: 'rcpt' | 'data') => {
     const [answer] = answers;
@@ -26,7 +27,8 @@ export async function openPostOffice(answers: Answer[] = []) {
     onData(stream, { envelope }, callback) {
       const chunks: Buffer[] = [];
       stream.on('data', (chunk: Buffer) => chunks.push(chunk));
-      stream.on('end', () => {
+      stream.on('end', async () => {
+        await pause.pass();
         const refused = next('data');
         if (refused) return callback(refused);
         if (answers[0] === 'take') answers.shift();
@@ -37,9 +39,10 @@ export async function openPostOffice(answers: Answer[] = []) {
     },
   });
   server.on('error', () => undefined);
-  const port = await listening(server.server);
+  const port = await listening(server.server, wanted);
   const smtp: Smtp = createSmtp({ host: '127.0.0.1', port, secure: false });
-  return { smtp, port, taken, answers, close: () => new Promise<void>((done) => server.close(done)) };
+  const close = () => new Promise<void>((done) => server.close(done));
+  return { smtp, port, taken, answers, close, hold: pause.hold, held: pause.held, release: pause.release };
 }
 export type PostOffice = Awaited<ReturnType<typeof openPostOffice>>;
 
@@ -70,10 +73,29 @@ export async function openHangingUp(when: 'greeting' | 'after-data') {
 /** Nobody listens there. */
 export const closedOffice = (): Smtp => createSmtp({ host: '127.0.0.1', port: 9, secure: false });
 
-const listening = (server: net.Server): Promise<number> =>
+const listening = (server: net.Server, wanted = 0): Promise<number> =>
   new Promise((resolve) => {
-    server.listen(0, '127.0.0.1', () => {
+    server.listen(wanted, '127.0.0.1', () => {
       const address = server.address();
       resolve(address && typeof address === 'object' ? address.port : 0);
     });
   });
+
+/** Lets a test stop a mail between its last line and the server's answer. */
+function createPause() {
+  let gate: Promise<void> | null = null;
+  let open = () => {};
+  let arrive = () => {};
+  const arrived = new Promise<void>((resolve) => (arrive = resolve));
+  return {
+    hold: () => {
+      gate = new Promise((resolve) => (open = resolve));
+    },
+    pass: async () => {
+      if (gate) arrive();
+      await gate;
+    },
+    held: () => arrived,
+    release: () => open(),
+  };
+}

@@ -7,7 +7,7 @@ import { createWithFirm } from '@/db/with-firm';
 
 import { newFirm, newMember, signedIn } from './firm';
 import { newJob, post, type Agent } from './job';
-import { contactInput, jobInput, runInput } from './job-inputs';
+import { contactInput, jobInput, runInput, specificationInput } from './job-inputs';
 import { publicUrl, type Stack } from './stack';
 
 export const words = {
@@ -21,7 +21,8 @@ export async function newDesk(stack: Stack, contacts = 1) {
   const owner = await newFirm(stack.services);
   const estimator = await newMember(stack.services, owner, { role: 'estimator', maySend: true });
   const agent = await signedIn(stack, estimator);
-  const { job, path, where } = await newJob(agent);
+  const { job, path, where, service } = await newJob(agent);
+  await agent.post(`${path}/specification`).send(specificationInput(service.id)).expect(201);
   const contactIds: string[] = [];
   for (let index = 0; index < contacts; index += 1) {
     const input = { ...contactInput, name: `Clara Client ${index}`, email: `clara-${index}@client.example` };
