@@ -8,6 +8,8 @@ const shared = {
 
 /** @type {import('jest').Config} */
 module.exports = {
+  // a machine that builds beside the tests is slow, not wrong
+  testTimeout: 60_000,
   globalSetup: '<rootDir>/__tests__/support/global-setup.js',
   globalTeardown: '<rootDir>/__tests__/support/global-teardown.js',
   projects: [
@@ -49,6 +51,7 @@ module.exports = {
         '@expo-google-fonts',
         'react-navigation',
         '@react-navigation',
+        'standard-navigation',
         'd3',
         'internmap',
         '@tanstack',

@@ -4,6 +4,7 @@ import path from 'node:path';
 
 import { ensure } from './debian.mjs';
 import { install } from './install.mjs';
+import * as postgres from './postgres.mjs';
 import { code, launch, root, stopAll } from './processes.mjs';
 import { freePort, stateFolder } from './state.mjs';
 import { step } from './steps.mjs';
@@ -103,7 +104,13 @@ const untilStarted = (app) =>
     app.once('exit', (status) => reject(new Error(`npm start ended (${status})`)));
   });
 
-for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => void stopAll().then(() => process.exit(1)));
+/** What a runner that was cut off left: its children, and the database when nobody else uses it. */
+async function cutOff() {
+  await stopAll();
+  if (postgres.isRunning()) await postgres.release();
+  process.exit(1);
+}
+for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void cutOff());
 
 async function main(chosen) {
   const unknown = chosen.filter((name) => !(name in runners));

@@ -9,8 +9,6 @@ import { isWrite, routesOf, type Route } from '../support/routes';
 import { startStack, type Stack } from '../support/stack';
 import { newWorld, pathIn, type World } from '../support/world';
 
-jest.setTimeout(60_000); // every route, as everyone
-
 /** Whoever opens a route to everyone says so here too. */
 const opened = ['GET /health', 'GET /ready', 'POST /session', 'GET /links/:token', 'GET /links/:token/pdf'];
 
