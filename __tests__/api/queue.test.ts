@@ -46,7 +46,7 @@ it('works a job once, and gives it again when the work failed', async () => {
   await until(async () => (await stateOf(id)) === 'completed');
   expect(seen).toEqual([job, job]);
   await boss.stop({ graceful: false });
-}, 30_000);
+});
 
 it('takes no job that is not of its shape', async () => {
   const boss = await worker();
@@ -57,7 +57,7 @@ it('takes no job that is not of its shape', async () => {
   expect(await stateOf(id)).toBe('failed');
   expect(handle).not.toHaveBeenCalled();
   await boss.stop({ graceful: false });
-}, 30_000);
+});
 
 it('puts work that a stop cuts off back into the queue, for the next worker', async () => {
   const cut = await worker();
@@ -88,4 +88,4 @@ it('puts work that a stop cuts off back into the queue, for the next worker', as
   await until(async () => (await stateOf(id)) === 'completed');
   expect(done).toEqual([job]);
   await next.stop({ graceful: false });
-}, 30_000);
+});

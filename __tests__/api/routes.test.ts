@@ -35,7 +35,7 @@ beforeAll(async () => {
   ];
   people = await Promise.all(members.map(async (member) => ({ member, agent: await signedIn(stack, member) })));
   world = await newWorld(await signedIn(stack, owner), stack.services);
-}, 30_000);
+});
 afterAll(() => stack.stop());
 
 type Asking = { agent: Agent; path?: string };

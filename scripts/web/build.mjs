@@ -7,6 +7,7 @@ import zlib from 'node:zlib';
 import { root, run } from '../processes.mjs';
 
 const dist = path.join(root, 'dist');
+const build = path.join(root, 'build');
 const sources = [
   'app',
   'components',
@@ -52,6 +53,15 @@ function compress(folder) {
   }
 }
 
+/** What an export that was cut off, or this process before, left behind. */
+function clearUnfinished() {
+  for (const name of fs.existsSync(build) ? fs.readdirSync(build) : []) {
+    const pid = /^web-(\d+)$/.exec(name)?.[1];
+    const isWorking = pid !== String(process.pid) && fs.existsSync(`/proc/${pid}`);
+    if (pid && !isWorking) fs.rmSync(path.join(build, name), { recursive: true, force: true });
+  }
+}
+
 /** Exports beside the last build and takes its place when all is there: a running server keeps a whole app. */
 export async function buildWeb(note = () => {}) {
   const stamp = path.join(dist, '.hash');
@@ -60,8 +70,8 @@ export async function buildWeb(note = () => {}) {
   note('exporting, about a minute, at each change');
   const { makeFonts } = await import('./fonts.mjs'); // a package, there only after the installation
   await makeFonts();
-  const fresh = path.join(root, 'build', `web-${process.pid}`);
-  fs.rmSync(fresh, { recursive: true, force: true });
+  clearUnfinished();
+  const fresh = path.join(build, `web-${process.pid}`);
   const env = { ...process.env, NODE_ENV: 'production', CI: '1', EXPO_OFFLINE: '1', EXPO_NO_TELEMETRY: '1' };
   const exported = ['export', '--platform', 'web', '--output-dir', path.relative(root, fresh)];
   await run(process.execPath, ['node_modules/expo/bin/cli', ...exported], env);
