@@ -81,6 +81,6 @@ a { color: light-dark(#9e3a1c, #e58a66); }
 .list li { display: flex; flex-wrap: wrap; gap: 0 1rem; padding: .6rem 0; border-bottom: 1px solid light-dark(#d8d2c6, #2e3740); }
 .list a { flex: 1 1 100%; }
 dl { display: grid; grid-template-columns: max-content 1fr; gap: 0 1rem; } dd { margin: 0; overflow-wrap: anywhere; }
-pre { white-space: pre-wrap; overflow-wrap: anywhere; font: inherit; padding: 1rem; background: light-dark(#fff, #1a2128); }
+pre { white-space: pre-wrap; overflow-wrap: anywhere; font: 0.9rem/1.5 ui-monospace, monospace; padding: 1rem; background: light-dark(#fff, #1a2128); }
 iframe { width: 100%; height: 36rem; border: 1px solid light-dark(#d8d2c6, #2e3740); background: #fff; }
 `;
