@@ -1,6 +1,7 @@
 import type { Problem } from '@/api/contracts/problem';
 import type { RunRow } from '@/components/run/run-row';
 import { EmptyState } from '@/components/ui/empty-state';
+import { Heading } from '@/components/ui/heading';
 import { Link, LinkButton } from '@/components/ui/link';
 import { ProblemWords } from '@/components/ui/problem-words';
 import { Screen } from '@/components/ui/screen';
@@ -44,6 +45,7 @@ function CannotBe({ jobId, row, problem, onRetry }: Omit<NoStudyScreenProps, 'ne
   const { run, place, service } = row;
   return (
     <>
+      <Heading>{problem.title}</Heading>
       <ProblemWords problem={problem} onRetry={onRetry} />
       {mayEdit && problem.status === 422 ? (
         <Row>

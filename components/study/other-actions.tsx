@@ -1,6 +1,8 @@
 import { useState } from 'react';
 
+import { useLayout } from '@/components/theme/use-layout';
 import { Button } from '@/components/ui/button';
+import { LinkButton } from '@/components/ui/link';
 import { Notice } from '@/components/ui/notice';
 import { Row, Stack } from '@/components/ui/stack';
 
@@ -19,6 +21,7 @@ export function OtherActions({ of, title, standing, mayEdit }: OtherActionsProps
   const [open, setOpen] = useState<'table' | 'finish'>();
   const [problem, setProblem] = useState<string>();
   const depart = useDepartures(of.jobId);
+  const { isPhone } = useLayout();
   const { back } = choicesOf(of, standing, 0);
   const close = () => setOpen(undefined);
   const goBack = () => {
@@ -37,6 +40,9 @@ export function OtherActions({ of, title, standing, mayEdit }: OtherActionsProps
       <Row>
         <Button label="As a table" onPress={() => setOpen('table')} />
         {mayEdit ? <Button label="Change the finish" onPress={() => setOpen('finish')} /> : null}
+        {mayEdit && isPhone ? (
+          <LinkButton label="Edit the run" href={`/jobs/${of.jobId}/runs/${of.run.id}/edit`} />
+        ) : null}
         {mayEdit && back ? <Button label="Back to the specification" onPress={goBack} /> : null}
       </Row>
       {open === 'table' ? (

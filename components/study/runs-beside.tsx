@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { RunCard } from '@/components/run/run-card';
@@ -18,6 +18,9 @@ export function RunsBeside({ rows, chosen, children }: RunsBesideProps) {
   const theme = useTheme();
   const { units } = useUnits();
   const level = rows.find(({ run }) => run.id === chosen)?.level;
+  const open = useRef<View>(null);
+  // the list scrolls by itself: walking from run to run must not leave the open one behind
+  useEffect(() => showInList(open.current), [chosen]);
   const beside = rows.filter(({ run }) => run.levelId === level?.id);
   return (
     <ListBeside
@@ -34,6 +37,7 @@ export function RunsBeside({ rows, chosen, children }: RunsBesideProps) {
             {beside.map((row) => (
               <View
                 key={row.run.id}
+                ref={row.run.id === chosen ? open : undefined}
                 role="listitem"
                 style={[
                   styles.row,
@@ -50,6 +54,10 @@ export function RunsBeside({ rows, chosen, children }: RunsBesideProps) {
       {children}
     </ListBeside>
   );
+}
+
+function showInList(row: unknown): void {
+  if (row instanceof HTMLElement && typeof row.scrollIntoView === 'function') row.scrollIntoView({ block: 'nearest' });
 }
 
 const styles = StyleSheet.create({

@@ -34,6 +34,8 @@ type StripColumnProps = {
   onKeyDown: (event: KeyboardEvent) => void;
 };
 
+/** From this width on the selected column has room for bold marks. */
+const roomy = 80;
 /** How far the selected section is lifted off the base line, and the room over the tallest one that this takes. */
 const raise = 8;
 export const headroom = raise + space.sm + 2;
@@ -72,7 +74,7 @@ export function StripColumn({ placed, base, above, pitch, candidate, selected, .
         {heat}
       </Text>
       {marksOf(candidate).map((mark) => (
-        <Mark key={mark.words} {...mark} align="center" strong={selected} />
+        <Mark key={mark.words} {...mark} align="center" strong={selected && pitch > roomy} />
       ))}
       <View style={styles.words}>
         {words.map((word) => (

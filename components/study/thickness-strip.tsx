@@ -25,9 +25,11 @@ type ThicknessStripProps = {
   onSelect: (place: number) => void;
 };
 
+/** Columns that do not all fit scroll, and then need not be narrow. */
+const scrolling = 78;
 const rooms = {
   phone: { least: 128, plot: 132, tallest: 112 },
-  wide: { least: 62, plot: 200, tallest: 84 },
+  wide: { least: 64, plot: 200, tallest: 84 },
 };
 
 /** Every thickness that is made, growing from left to right on one base line; one of them is selected. */
@@ -37,7 +39,9 @@ export function ThicknessStrip({ runStudy, standing, selected, onSelect }: Thick
   const left = isPhone ? 0 : gutters[units];
   const [width, setWidth] = useState(isPhone ? 358 : 800);
   const facts = stripFacts(runStudy, units);
-  const layout = strip(facts.input, { width: width - left, ...rooms[isPhone ? 'phone' : 'wide'] });
+  const room = { width: width - left, ...rooms[isPhone ? 'phone' : 'wide'] };
+  const fits = room.width / runStudy.study.candidates.length >= room.least;
+  const layout = strip(facts.input, { ...room, least: fits ? room.least : Math.max(room.least, scrolling) });
   const heatUnit = unitLabel(heatKind(runStudy.study.candidates[0]), units);
   return (
     <View style={styles.whole} onLayout={({ nativeEvent }) => setWidth(nativeEvent.layout.width)}>
