@@ -40,13 +40,14 @@ it('opens without an account, and shows what was sent and no more', async () => 
   const view = linkViewSchema.strict().parse(answer.body);
   expect(view).toMatchObject({ state: 'current', supersededBy: null, contact: { name: 'Clara Client 0' } });
   expect(view.sent?.letter).toBe('A');
+  expect(view.sent?.job.codeEdition).toBe('ASHRAE 90.1-2019');
   expect(view.sent?.schedule.rows.length).toBeGreaterThan(0);
   expect(view.sent?.conditions[0]?.words.length).toBeGreaterThan(4);
   expect(Object.keys(answer.body.sent).sort()).toEqual([
     'cautions',
+    'clarifications',
     'conditions',
     'engineVersion',
-    'flags',
     'frozenAt',
     'job',
     'letter',
@@ -130,15 +131,19 @@ it('says that it was revoked, and shows nothing from then on', async () => {
   await agent.post(`/api/messages/${message.id}/link-revocation`).send({}).expect(409);
 });
 
-it.each(['x', 'A'.repeat(43), 'A'.repeat(5000), '%00', "'%20or%201=1", '%F0%9F%8F%8A'])(
-  'has nothing under the token %s',
-  async (token) => {
-    const answer = await visit(token).expect(404);
-    expect(answer.body.detail).toBe('This link does not exist, or no longer opens');
-    expect(answer.headers['x-robots-tag']).toContain('noindex');
-    await visit(`${token}/pdf`).expect(404);
-  },
-);
+it.each([
+  ['too short', 'x'],
+  ['of the right form', 'A'.repeat(43)],
+  ['far too long', 'A'.repeat(5000)],
+  ['with a zero byte', '%00'],
+  ['with SQL', "'%20or%201=1"],
+  ['with an emoji', '%F0%9F%8F%8A'],
+])('has nothing under a token that is %s, and says no more', async (_case, token) => {
+  const answer = await visit(token).expect(404);
+  expect(answer.body.detail).toBe('This link does not exist, or no longer opens');
+  expect(answer.headers['x-robots-tag']).toContain('noindex');
+  await visit(`${token}/pdf`).expect(404);
+});
 
 it('stops who tries tokens', async () => {
   const own = await startStack();

@@ -3,6 +3,7 @@ import type { LinkView } from '@/api/contracts/link';
 import { snapshotSchema, type Snapshot } from '@/api/contracts/revision';
 import { takeoffFileName } from '@/api/documents/file-name';
 import { clarificationsOf } from '@/api/documents/takeoff/clarifications';
+import { codeTitle } from '@/api/documents/takeoff/code-title';
 import { conditionsInWords } from '@/api/documents/takeoff/conditions-in-words';
 import { AppError } from '@/api/errors';
 import type { LinkDoors } from '@/db/repositories/link-doors';
@@ -44,7 +45,7 @@ const noSuchLink = () => new AppError('not-found', 'This link does not exist, or
 /** Only what the document itself tells the client. */
 function viewOf(snapshot: Snapshot): NonNullable<LinkView['sent']> {
   const { letter, frozenAt, validUntil, timeZone, preparedBy, letterhead, schedule, takeoff, cautions } = snapshot;
-  const { number, name, site, scope, codeEdition } = snapshot.job;
+  const { number, name, site, scope } = snapshot.job;
   return {
     letter,
     frozenAt,
@@ -57,7 +58,7 @@ function viewOf(snapshot: Snapshot): NonNullable<LinkView['sent']> {
     cautions,
     method: snapshot.method,
     engineVersion: snapshot.engineVersion,
-    job: { number, name, site, scope, codeEdition },
+    job: { number, name, site, scope, codeEdition: codeTitle(snapshot) },
     clarifications: clarificationsOf(snapshot).map(({ number: place, title, entries }) => ({
       number: place,
       title,

@@ -2,6 +2,7 @@ import { closePart, openPart, paragraph, subheading } from '@/api/documents/pres
 import { styles } from '@/api/documents/press/ink';
 import { piece, printTable, stack, text, type Row } from '@/api/documents/press/table';
 
+import { codeTitle } from './code-title';
 import type { Sheet } from './sheet';
 
 type Basis = Pick<Sheet, 'flow' | 'snapshot' | 'locale'>;
@@ -41,10 +42,6 @@ function printTerms({ flow, snapshot, locale }: Basis): void {
   ];
   printTable(flow, { caption: 'Basis', bare: true, columns: [{ title: '', width: 104 }, { title: '' }], rows });
 }
-
-/** The edition by its name, as the standards used have it. */
-const codeTitle = ({ standards, job }: Basis['snapshot']) =>
-  standards.find(({ kind, id }) => kind === 'code' && id.startsWith(job.codeEdition))?.name ?? job.codeEdition;
 
 const fact = (name: string, words: string): Row => ({ cells: [text(name, styles.cellStrong), text(words)] });
 
