@@ -1,4 +1,5 @@
-import { Redirect, Slot } from 'expo-router';
+import { Navigator, Redirect, Slot } from 'expo-router';
+import { useState } from 'react';
 
 import { FieldUnitsProvider } from '@/components/forms/field-units';
 import { useHasUnsaved } from '@/components/forms/unsaved';
@@ -9,15 +10,36 @@ import { Main } from '@/components/ui/main';
 import { ProblemScreen } from '@/components/ui/problem-screen';
 import { useSession } from '@/hooks/use-session';
 
-/** The gate: nobody gets further without a session, and nothing unsaved is lost when one ends. */
+/** The navigator stands before it is known who is there: without it the router forgets which screen was asked for. */
 export default function MemberLayout() {
+  return (
+    <Navigator>
+      <Gate />
+    </Navigator>
+  );
+}
+
+/** Nobody gets further without a session, and nothing unsaved is lost when one ends. */
+function Gate() {
   const { session, problem, isSignedOut, reload } = useSession();
   const hasUnsaved = useHasUnsaved();
-  if (isSignedOut && !(session && hasUnsaved)) return <ToSignIn />;
-  if (!session)
+  // as long as no screen is drawn, the router does not keep the address in full
+  const [arrival] = useState(address);
+  if (isSignedOut && !(session && hasUnsaved)) return <ToSignIn next={session ? address() : arrival} />;
+  if (!session && problem) {
     return (
-      <Main>{problem ? <ProblemScreen problem={problem} onRetry={reload} /> : <LoadingScreen title="Thickset" />}</Main>
+      <Main>
+        <ProblemScreen problem={problem} onRetry={reload} />
+      </Main>
     );
+  }
+  if (!session) {
+    return (
+      <Main>
+        <LoadingScreen title="Thickset" />
+      </Main>
+    );
+  }
   return (
     <FieldUnitsProvider units={session.member.units}>
       <Shell session={session}>
@@ -28,8 +50,7 @@ export default function MemberLayout() {
   );
 }
 
+const address = () => `${window.location.pathname}${window.location.search}`;
+
 /** And back to where it was asked for, its filters included. */
-function ToSignIn() {
-  const { pathname, search } = window.location;
-  return <Redirect href={{ pathname: '/sign-in', params: { next: `${pathname}${search}` } }} />;
-}
+const ToSignIn = ({ next }: { next: string }) => <Redirect href={{ pathname: '/sign-in', params: { next } }} />;

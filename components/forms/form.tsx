@@ -19,7 +19,7 @@ type FormProps<Input extends FieldValues, Output> = Saved<Input, Output> & {
   saveLabel: string;
   /** a way out without saving */
   onCancel?: () => void;
-  /** further actions, beside saving */
+  /** further actions, beside saving; on a phone above it */
   actions?: ReactNode;
   children: ReactNode;
 };
@@ -35,15 +35,12 @@ export function Form<Input extends FieldValues, Output>(props: FormProps<Input, 
     <>
       <FormBody id={id} label={label} form={form} onSave={onSave}>
         {children}
-        <View
-          style={[
-            styles.actions,
-            isPhone && [styles.pinned, { backgroundColor: theme.paper, borderTopColor: theme.rule }],
-          ]}
-        >
+        {isPhone && actions ? <View style={styles.actions}>{actions}</View> : null}
+        {isPhone && actions ? <View style={styles.actions}>{actions}</View> : null}
+        <View style={[styles.actions, styles.pinned, { backgroundColor: theme.paper, borderTopColor: theme.rule }]}>
           <Button label={saveLabel} busyLabel="Saving" tone="action" submit busy={isSubmitting} full={isPhone} />
           {onCancel ? <Button label="Cancel" onPress={onCancel} /> : null}
-          {actions}
+          {isPhone ? null : actions}
         </View>
       </FormBody>
       <LeaveGuard isUnsaved={isDirty && !isSubmitting} />

@@ -51,7 +51,7 @@ export function PersonPanel({ session }: { session: Session }) {
         fill
       />
       <Segmented label="Appearance" hideLabel value={appearance} segments={looks} onChange={pin} fill />
-      <Button label="Sign out" onPress={() => void leave()} />
+      <Button label="Sign out" tone="plain" onPress={() => void leave()} />
     </View>
   );
 }

@@ -44,7 +44,7 @@ function Places({ label, title, places }: { label: string; title?: ReactNode; pl
     <View role="navigation" aria-label={label} style={styles.places}>
       {title ? (
         <View style={styles.title}>
-          <Text size="small" tone="inkSoft">
+          <Text size="small" tone="inkSoft" lines={2}>
             {title}
           </Text>
         </View>

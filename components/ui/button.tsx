@@ -6,8 +6,8 @@ import { webStyle } from '@/components/theme/web-style';
 
 import { Element } from './element';
 
-/** action: the one thing to do here; quiet: everything else; danger: what cannot be taken back. */
-export type ButtonTone = 'action' | 'quiet' | 'danger';
+/** action: the one thing to do here; quiet: everything else; plain: no frame; danger: what cannot be taken back. */
+export type ButtonTone = 'action' | 'quiet' | 'plain' | 'danger';
 
 export type ButtonProps = {
   label: string;
@@ -47,7 +47,7 @@ export function Button({ label, onPress, tone = 'quiet', submit, formId, name, .
         toneStyle(theme, tone),
         full && styles.full,
         large && styles.large,
-        (busy || disabled) && styles.dim,
+        disabled && styles.dim,
       ]}
     >
       {(busy && busyLabel) || label}
@@ -57,6 +57,7 @@ export function Button({ label, onPress, tone = 'quiet', submit, formId, name, .
 
 /** A link that looks like a button takes the same. */
 export function toneStyle(theme: Theme, tone: ButtonTone) {
+  if (tone === 'plain') return { backgroundColor: 'transparent', borderColor: 'transparent', color: theme.inkSoft };
   if (tone === 'quiet') return { backgroundColor: theme.sheet, borderColor: theme.rule, color: theme.ink };
   const fill = tone === 'action' ? theme.oxide : theme.fail;
   return { backgroundColor: fill, borderColor: fill, color: theme.onAction };

@@ -1,4 +1,5 @@
 import type { Href } from 'expo-router';
+import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { hairline, space } from '@/components/theme/tokens';
@@ -7,7 +8,18 @@ import { useTheme } from '@/components/theme/use-theme';
 import { LinkArea } from './link';
 import { Text } from './text';
 
-export type ListItem = { key: string; title: string; text?: string; aside?: string; href: Href };
+export type ListItem = {
+  key: string;
+  title: string;
+  text?: string;
+  /** the one fact by which it is known, set to the right */
+  aside?: string;
+  /** the ink of that fact: a hot or a cold service */
+  tone?: 'hot' | 'cold';
+  /** what it looks like, drawn 28 or 40 wide */
+  glyph?: ReactNode;
+  href: Href;
+};
 
 type ListRowsProps = {
   /** what the list lists */
@@ -35,6 +47,8 @@ function ListRow({
   title,
   text,
   aside,
+  tone,
+  glyph,
   href,
   isChosen,
   flush,
@@ -44,6 +58,7 @@ function ListRow({
   return (
     <LinkArea href={href} current={isChosen}>
       <View style={[styles.row, flush ? styles.flush : colours, isChosen && { backgroundColor: theme.sheet }]}>
+        {glyph ? <View style={styles.glyph}>{glyph}</View> : null}
         <View style={styles.words}>
           <Text weight="strong">{title}</Text>
           {text ? (
@@ -54,7 +69,7 @@ function ListRow({
         </View>
         {aside ? (
           <View style={styles.aside}>
-            <Text numeric align="right">
+            <Text numeric align="right" tone={tone} weight={tone ? 'strong' : 'regular'}>
               {aside}
             </Text>
           </View>
@@ -77,6 +92,7 @@ const styles = StyleSheet.create({
     borderBottomWidth: hairline,
   },
   flush: { paddingLeft: 0, paddingRight: space.xs, borderLeftWidth: 0, borderBottomWidth: 0 },
+  glyph: { flexShrink: 0 },
   words: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
   aside: { flexShrink: 0, maxWidth: '40%' },
 });

@@ -128,7 +128,7 @@ const styles = StyleSheet.create({
     paddingBottom: 0,
     paddingLeft: space.sm,
     paddingRight: space.sm,
-    borderWidth: 2,
+    borderWidth: hairline,
     borderStyle: 'solid',
     borderRadius: radius.sm,
     fontFamily,
