@@ -80,7 +80,10 @@ const styles = StyleSheet.create({
   cell: webStyle({
     height: touchTarget,
     boxSizing: 'border-box',
-    padding: `0 ${space.xs}px`,
+    paddingTop: 0,
+    paddingBottom: 0,
+    paddingLeft: space.xs,
+    paddingRight: space.xs,
     borderBottomWidth: hairline,
     borderBottomStyle: 'solid',
     overflow: 'hidden',
