@@ -20,7 +20,8 @@ export function judgeMaterial(trial: Trial): LimitVerdict {
   const layers = build.materials.flatMap((material, place) => [
     hottestSide(material, place, hot),
     coldestSide(material, place, cold),
-    ...[hot, cold].map((solved) => meanOf(material, place, solved)),
+    ...unknownMean(material, place, hot),
+    ...unknownMean(material, place, cold),
     ...fireOf(material, trial),
   ]);
   return worst([finishOf(trial, hot), ...retarderOf(trial), ...layers]);
@@ -97,11 +98,11 @@ function coldestSide(material: Material, place: number, solved: Solved): LimitVe
 }
 
 /** Published points are mean temperatures: a layer whose mean lies outside them is not known, whatever was solved. */
-function meanOf({ name, curve }: Material, place: number, solved: Solved): LimitVerdict {
+function unknownMean({ name, curve }: Material, place: number, solved: Solved): LimitVerdict[] {
   const [inner, outer] = sidesOf(solved, place);
   const mean = (inner + outer) / 2;
   const [first, last] = [curve.points[0]?.[0] ?? NaN, curve.points.at(-1)?.[0] ?? NaN];
-  const isKnown = mean >= first && mean <= last;
+  if (mean >= first && mean <= last) return [];
   const because = [
     `the mean of ${name} is `,
     amount('temperature', mean),
@@ -111,7 +112,7 @@ function meanOf({ name, curve }: Material, place: number, solved: Solved): Limit
     amount('temperature', last, 0),
   ];
   const details = { value: mean, unit: 'temperature', judgedAt: solved.judgedAt, source: curve.source } as const;
-  return isKnown ? judged('material', { ...details, isMet: true, because }) : cannotTell('material', because, details);
+  return [cannotTell('material', because, details)];
 }
 
 /** Flame spread at most 25 and smoke developed at most 50, or noncombustible. */
