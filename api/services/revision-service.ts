@@ -10,7 +10,7 @@ import { allow } from './allow';
 import { dateIn, daysAfter } from './calendar';
 import { sha256 } from './hashes';
 import { holdJob, must, noSuchJob } from './job-rows';
-import { revisionLetter } from './revision-letters';
+import { revisionLetter } from '@/api/contracts/revision-letter';
 import { withMessages } from './revision-rows';
 import { takeSnapshot, zoneOf } from './snapshot';
 

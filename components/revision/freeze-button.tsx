@@ -2,18 +2,17 @@ import { useState } from 'react';
 
 import type { Judgement } from '@/api/contracts/judgement';
 import type { Revision } from '@/api/contracts/revision';
+import { revisionLetter } from '@/api/contracts/revision-letter';
 import { problemOf } from '@/components/forms/show-problem';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 import { useToast } from '@/components/ui/toast';
 
-import { nextLetter } from './next-letter';
-
 type FreezeButtonProps = { revisions: readonly Revision[]; judgement: Judgement; onFreeze: () => Promise<unknown> };
 
 /** Freezing commits what stands now under the next letter; nothing recomputes it afterwards. */
 export function FreezeButton({ revisions, judgement, onFreeze }: FreezeButtonProps) {
-  const letter = nextLetter(revisions.map((revision) => revision.letter));
+  const letter = revisionLetter(revisions.length + 1);
   const [asks, setAsks] = useState(false);
   const [busy, setBusy] = useState(false);
   const toast = useToast();

@@ -6,7 +6,7 @@ import { clarificationsOf, numbersFor } from '@/api/documents/takeoff/clarificat
 import { numberRanges } from '@/api/documents/takeoff/number-ranges';
 import { printedQuantities } from '@/api/documents/takeoff/printed-quantities';
 import { dateIn, daysAfter } from '@/api/services/calendar';
-import { revisionLetter } from '@/api/services/revision-letters';
+import { revisionLetter } from '@/api/contracts/revision-letter';
 
 import { sampleSnapshot } from '../../support/snapshot';
 

@@ -1,16 +1,5 @@
 import type { Message } from '@/api/contracts/revision';
 import { messageStateWords, openingsText } from '@/components/revision/message-words';
-import { nextLetter } from '@/components/revision/next-letter';
-
-it.each([
-  [[], 'A'],
-  [['A'], 'B'],
-  [['B', 'A'], 'C'],
-  [['Z', 'Y'], 'AA'],
-  [['AZ', 'Z'], 'BA'],
-])('after %p comes %p', (letters, next) => {
-  expect(nextLetter(letters)).toBe(next);
-});
 
 const message: Message = {
   id: 'm',
