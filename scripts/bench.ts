@@ -3,6 +3,7 @@ const benches: Record<string, () => Promise<Record<string, number>>> = {
   engine: async () => (await import('./bench/engine')).benchEngine(),
   study: async () => (await import('./bench/study')).benchStudy(),
   judging: async () => (await import('./bench/judging')).benchJudging(),
+  documents: async () => (await import('./bench/documents')).benchDocuments(),
 };
 
 /** `bench -- engine` prints the one bench; without a name all of them, each under its own. */
