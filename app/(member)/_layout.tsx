@@ -1,5 +1,5 @@
-import { Navigator, Redirect, Slot } from 'expo-router';
-import { useState } from 'react';
+import { Navigator, Redirect, Slot, useRouter } from 'expo-router';
+import { useEffect, useState } from 'react';
 
 import { FieldUnitsProvider } from '@/components/forms/field-units';
 import { useHasUnsaved } from '@/components/forms/unsaved';
@@ -45,9 +45,17 @@ function Gate() {
       <Shell session={session}>
         <Slot />
       </Shell>
+      <FullAddress />
       {isSignedOut ? <SessionEnded email={session.member.email} /> : null}
     </FieldUnitsProvider>
   );
+}
+
+/** Brings back the part of the address that the router dropped while no screen was drawn: a change of nothing makes it look again. */
+function FullAddress() {
+  const router = useRouter();
+  useEffect(() => router.setParams({}), [router]);
+  return null;
 }
 
 const address = () => `${window.location.pathname}${window.location.search}`;
