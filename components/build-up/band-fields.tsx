@@ -11,7 +11,7 @@ type BandFieldsProps = Pick<UseFormReturn<CoveringDraft>, 'control'> & { names: 
 
 /** From which size to which; open at either end. */
 export const BandFields = ({ control, names }: BandFieldsProps) => (
-  <Grid column={180} gap="sm">
+  <Grid column={150} gap="sm">
     <DnField control={control} name="fromDn" label="From size" open="The smallest" names={names} />
     <DnField control={control} name="toDn" label="To size" open="The largest" names={names} />
   </Grid>

@@ -51,8 +51,7 @@ const serviceColumn = ({ services }: CoveringNames): Column<BuildUp> => ({
 /** What build-ups and specification rows have in common, as columns. */
 export function coveringColumns<Row extends BuildUp>(names: CoveringNames): Column<Row>[] {
   return [
-    { key: 'body', label: 'Applies to', cell: ({ appliesTo }) => <Text>{bodyWords[appliesTo]}</Text> },
-    { key: 'sizes', label: 'Sizes', cell: (row) => <Text noWrap>{sizesOf(row, names)}</Text> },
+    { key: 'sizes', label: 'Applies to', cell: (row) => <Text noWrap>{sizesOf(row, names)}</Text> },
     { key: 'places', label: 'Places', cell: ({ placeIds }) => <Text>{placesText(placeIds, names.places)}</Text> },
     { key: 'material', label: 'Material', cell: ({ layers }) => <Text>{materialsText(layers, names.materials)}</Text> },
     {
@@ -73,9 +72,13 @@ export function coveringColumns<Row extends BuildUp>(names: CoveringNames): Colu
     {
       key: 'retarder',
       label: 'Vapour retarder',
-      cell: ({ vapourRetarder }) => <Text tone="inkSoft">{retarderWords[vapourRetarder]}</Text>,
+      cell: ({ vapourRetarder }) => (
+        <Text tone="inkSoft">{vapourRetarder === 'none' ? '–' : retarderWords[vapourRetarder]}</Text>
+      ),
     },
   ];
 }
 
-const sizesOf = (row: BuildUp, names: CoveringNames) => (row.appliesTo === 'pipe' ? bandText(row, names) : '–');
+/** Pipes by their sizes; ducts and equipment have none. */
+const sizesOf = (row: BuildUp, names: CoveringNames) =>
+  row.appliesTo === 'pipe' ? bandText(row, names) : bodyWords[row.appliesTo];

@@ -40,7 +40,7 @@ export function CoveringFields({ names, library, finishes, services, isOutermost
   };
   return (
     <>
-      <Grid column={240}>
+      <Grid column={320}>
         <FormSelect
           control={control}
           name="serviceId"
@@ -53,7 +53,7 @@ export function CoveringFields({ names, library, finishes, services, isOutermost
       {appliesTo === 'pipe' ? <BandFields control={control} names={names} /> : null}
       <PlacePicks control={control} places={names.places} />
       <LayerFields control={control} setValue={setValue} library={library} isOutermostOpen={isOutermostOpen} />
-      <Grid column={240}>
+      <Grid column={320}>
         <FormSelect
           control={control}
           name="finishId"

@@ -3,11 +3,12 @@ import { showWithUnit, type UnitSystem } from '@/api/contracts/quantities';
 import { thicknessText } from '@/api/contracts/words-text';
 
 export type Named = { id: string; name: string };
-export type DnSize = { dn: number; nominal: string };
+export type DnSize = { dn: number; nominal: string; outsideDiameter: number };
+type NamedService = Named & { states: readonly { nature: 'hot' | 'cold' }[] };
 /** What a row of a build-up or a specification names by id, as a person reads it. */
 export type CoveringNames = {
   units: UnitSystem;
-  services: readonly Named[];
+  services: readonly NamedService[];
   places: readonly Named[];
   materials: readonly Named[];
   finishes: readonly Named[];
@@ -15,7 +16,7 @@ export type CoveringNames = {
 };
 
 export const bodyWords: Record<BuildUpInput['appliesTo'], string> = {
-  pipe: 'Pipes and tubes',
+  pipe: 'Pipes',
   duct: 'Ducts',
   equipment: 'Equipment',
 };
@@ -23,7 +24,7 @@ export const bodyWords: Record<BuildUpInput['appliesTo'], string> = {
 export const retarderWords: Record<BuildUpInput['vapourRetarder'], string> = {
   none: 'None',
   'sealed-facing': 'Sealed facing',
-  'closed-cell': 'The closed-cell material itself',
+  'closed-cell': 'Closed cells, sealed joints',
   'mastic-and-mesh': 'Mastic and mesh',
 };
 
@@ -42,7 +43,7 @@ type Band = Pick<BuildUpInput, 'appliesTo' | 'fromDn' | 'toDn'>;
 
 /** "DN 40 to 200", "DN 65 and over", "up to DN 32", "All sizes". */
 export function bandText({ fromDn, toDn }: Band, names: Pick<CoveringNames, 'units' | 'sizes'>): string {
-  if (fromDn === null && toDn === null) return 'All sizes';
+  if (fromDn === null && toDn === null) return 'All pipe sizes';
   if (fromDn === null) return `up to ${dnText(toDn!, names)}`;
   if (toDn === null) return `${dnText(fromDn, names)} and over`;
   if (fromDn === toDn) return dnText(fromDn, names);
@@ -80,7 +81,7 @@ export function coveringFacts(row: BuildUpInput, names: CoveringNames) {
     { term: 'Service', value: nameIn(names.services, row.serviceId) },
     { term: 'Applies to', value: bodyWords[row.appliesTo] },
     { term: 'Places', value: placesText(row.placeIds, names.places) },
-    { term: 'Sizes', value: bandText(row, names) },
+    { term: 'Sizes', value: row.appliesTo === 'pipe' ? bandText(row, names) : '' },
     ...row.layers.map((layer, index) => ({
       term: row.layers.length > 1 ? `Layer ${index + 1}` : 'Layer',
       value: `${layerText(layer, names)}${layer.thickness === null ? ', thickness left to the study' : ''}`,

@@ -70,7 +70,7 @@ function LayerCard({ control, setValue, library, isOutermostOpen, index, count, 
           {onTakeOut ? <Button label="Take it out" name={`Take out: ${title}`} onPress={onTakeOut} /> : null}
         </Row>
       ) : null}
-      <Grid column={240} gap="sm">
+      <Grid column={200} gap="sm">
         <FormSelect
           control={control}
           name={`layers.${index}.materialId`}

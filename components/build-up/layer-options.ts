@@ -36,8 +36,10 @@ export function thicknessOptions(materialId: string, { materials, series, units,
   return [...inMaterial, ...listed([...others].sort(byThickness), notStocked)];
 }
 
-const byThickness = (a: Name, b: Name) => millimetres(a) - millimetres(b);
-const millimetres = (name: Name) => Number(name.slice(3)) * (name.startsWith('in:') ? 25.4 : 1);
+const byThickness = (a: Name, b: Name) => metresOf(a) - metresOf(b);
+
+/** A name's nominal thickness [m]: for order and for drawing, never for comparing names. */
+export const metresOf = (name: Name): number => Number(name.slice(3)) * (name.startsWith('in:') ? 0.0254 : 0.001);
 
 /** Whether a layer of it gets thinner when it is put up, so that the thickness as put up may be stated. */
 export function isCompressed(materialId: string, { materials, series }: LayerLibrary): boolean {

@@ -19,8 +19,8 @@ export function useCoveringNames(jobId: string): { names: RowsAndNames | undefin
   const { data: pipeSizes, problem: noSizes } = usePipeSizes();
   const problem = noServices ?? noPlaces ?? noMaterials ?? noFinishes ?? noSizes;
   if (!services || !places || !materials || !finishes || !pipeSizes) return { names: undefined, problem };
-  const sizes = pipeSizes.flatMap(({ standard, dn, nominal }) =>
-    standard === 'asme-steel' && dn !== null ? [{ dn, nominal }] : [],
+  const sizes = pipeSizes.flatMap(({ standard, dn, nominal, outsideDiameter }) =>
+    standard === 'asme-steel' && dn !== null ? [{ dn, nominal, outsideDiameter }] : [],
   );
   return { names: { units, services, places, materials, finishes, sizes }, problem };
 }

@@ -12,6 +12,8 @@ import { Grid, Row, Stack } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
 import { useContacts } from '@/hooks/use-contacts';
 
+import { contactText } from './job-facts';
+
 /** Whom the job's revisions are sent to; somebody new is entered on the spot. */
 export function ContactPicks({ control }: Pick<UseFormReturn<JobInput>, 'control'>) {
   const { contacts = [] } = useContacts();
@@ -25,12 +27,11 @@ export function ContactPicks({ control }: Pick<UseFormReturn<JobInput>, 'control
       <Text size="small" tone="inkSoft">
         Whom the revisions of this job are sent to.
       </Text>
-      <Grid column={240} gap="xxs">
+      <Grid column={320} gap="xxs">
         {inOrder(contacts).map(({ id, name, company }) => (
           <Checkbox
             key={id}
-            label={name}
-            hint={company || undefined}
+            label={contactText({ name, company })}
             checked={picked.includes(id)}
             onChange={(isPicked) => pick(id, isPicked)}
             onBlur={leave}

@@ -15,7 +15,7 @@ export function DueFields({ form: { control, setValue }, timeZone }: DueFieldsPr
     setValue('bidDue', isSet ? { date: '', time: '14:00', zone: timeZone } : null, { shouldDirty: true });
   return (
     <Stack gap="xs" role="group" aria-label="Bid due">
-      <Checkbox label="The bid is due on a day" checked={bidDue !== null} onChange={set} />
+      <Checkbox label="The bid has a due date" checked={bidDue !== null} onChange={set} />
       {bidDue ? (
         <Grid column={160} gap="sm">
           <FormTextField control={control} name="bidDue.date" label="Day" kind="date" />

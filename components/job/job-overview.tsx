@@ -82,7 +82,7 @@ function Facts({ job }: { job: Job }) {
           A revision is sent to the contacts that the job names. Choose them in the job’s details.
         </Notice>
       ) : null}
-      <FactList facts={facts} />
+      <FactList facts={facts} termWidth={116} />
       {mayEdit ? <Link href={`/jobs/${job.id}/edit`} label="Change these" /> : null}
     </Stack>
   );
@@ -96,5 +96,5 @@ const styles = StyleSheet.create({
   split: { flexDirection: 'row', alignItems: 'flex-start' },
   main: { gap: space.xl, minWidth: 0 },
   mainBeside: { flexGrow: 1, flexShrink: 1, flexBasis: 0, maxWidth: 780 },
-  side: { width: 340, flexShrink: 0 },
+  side: { width: 372, flexShrink: 0 },
 });

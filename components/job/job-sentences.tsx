@@ -54,7 +54,7 @@ function TakenOff({ jobId, runs }: { jobId: string; runs: readonly Run[] }) {
   if (runs.length === 0) return <Text size="sentence">Nothing is taken off yet.</Text>;
   return (
     <Text size="sentence">
-      {`${takenOffText(runs, units)} are `}
+      {`${takenOffText(runs, units)} ${runs.length === 1 ? 'is' : 'are'} `}
       <Link href={`/jobs/${jobId}/runs`} label="taken off" size="sentence" inline />.
     </Text>
   );

@@ -6,17 +6,19 @@ import { lengthOf } from '@/api/contracts/run-words';
 
 import { plural } from './due-words';
 
-/** "42 pipe runs, 6 duct runs and 4 pieces of equipment, 2,296.5 m in all". */
+/** "42 pipe runs (2,296.5 m), 6 duct runs (173.0 m) and 4 pieces of equipment". */
 export function takenOffText(runs: readonly Run[], units: UnitSystem): string {
-  const count = (...kinds: Run['shape']['kind'][]) => runs.filter(({ shape }) => kinds.includes(shape.kind)).length;
-  const parts = [
-    counted(count('pipe'), 'pipe run'),
-    counted(count('round-duct', 'rectangular-duct'), 'duct run'),
-    counted(count('vessel', 'flat', 'piece'), 'piece of equipment', 'pieces of equipment'),
-  ].flat();
+  const of = (...kinds: Run['shape']['kind'][]) => runs.filter(({ shape }) => kinds.includes(shape.kind));
+  return listText([
+    ...measured(of('pipe'), 'pipe run', units),
+    ...measured(of('round-duct', 'rectangular-duct'), 'duct run', units),
+    ...counted(of('vessel', 'flat', 'piece').length, 'piece of equipment', 'pieces of equipment'),
+  ]);
+}
+
+function measured(runs: readonly Run[], one: string, units: UnitSystem): string[] {
   const length = runs.reduce((sum, { shape }) => sum + (lengthOf(shape) ?? 0), 0);
-  const metres = length > 0 ? `, ${grouped(showWithUnit('length', length, { units }))} in all` : '';
-  return `${listText(parts)}${metres}`;
+  return counted(runs.length, one).map((text) => `${text} (${grouped(showWithUnit('length', length, { units }))})`);
 }
 
 const counted = (count: number, one: string, many?: string) => (count > 0 ? [plural(count, one, many)] : []);

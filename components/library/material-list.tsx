@@ -5,6 +5,7 @@ import { ListRows, type ListItem } from '@/components/ui/list-row';
 import { Text } from '@/components/ui/text';
 import { useUnits } from '@/hooks/use-units';
 
+import { MaterialGlyph } from './material-glyph';
 import { conductivityAt, conductivityText, conductivityUnit, limitsOfUseText } from './library-words';
 import { degreesText } from '@/components/place/place-words';
 
@@ -22,6 +23,7 @@ export const materialItems = (materials: readonly LibraryMaterial[], units: Unit
     title: material.name,
     text: material.standards,
     aside: limitsOfUseText(material, units),
+    glyph: <MaterialGlyph materialId={material.id} size={28} isClosed={material.closedCell} />,
     href: materialHref(material.id),
   }));
 
@@ -41,6 +43,13 @@ export function MaterialList({ materials }: { materials: readonly LibraryMateria
 }
 
 const columnsFor = (units: Units): readonly Column<LibraryMaterial>[] => [
+  {
+    key: 'section',
+    label: 'Section',
+    hideLabel: true,
+    width: 44,
+    cell: ({ id, closedCell }) => <MaterialGlyph materialId={id} size={28} isClosed={closedCell} />,
+  },
   { key: 'name', label: 'Material', cell: ({ name }) => name },
   { key: 'standards', label: 'Standards', cell: ({ standards }) => <Text tone="inkSoft">{standards}</Text> },
   { key: 'use', label: 'Used between', cell: (material) => <Text noWrap>{limitsOfUseText(material, units)}</Text> },

@@ -13,6 +13,7 @@ import { Heading } from '@/components/ui/heading';
 import { Stack } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
 
+import { DewPointLine } from './dew-point-line';
 import { conditionSetWords } from './place-words';
 
 type ConditionFieldsProps = { form: UseFormReturn<PlaceInput> };
@@ -71,9 +72,13 @@ function SetFields({ set, form: { control }, isPhone }: SetFieldsProps) {
     <View style={[isPhone ? styles.stack : styles.row, { borderTopColor: theme.rule }, styles.line]}>
       <View style={isPhone ? styles.whole : styles.title}>
         <Text weight="strong">{title}</Text>
-        <Text size="small" tone="inkSoft">
-          {decides}
-        </Text>
+        {name === 'mostHumid' ? (
+          <DewPointLine control={control} />
+        ) : (
+          <Text size="small" tone="inkSoft">
+            {decides}
+          </Text>
+        )}
       </View>
       <FormQuantityField
         control={control}

@@ -58,7 +58,7 @@ export function PlaceForm({ jobId, place, copyOf, ductLocations, onSaved, onCanc
       <TouchFields form={form} />
       <ConditionFields form={form} />
       <Stack gap="sm">
-        <Grid column={260}>
+        <Grid column={320}>
           <FormSelect
             control={control}
             name="ductLocation"

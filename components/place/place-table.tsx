@@ -4,7 +4,7 @@ import { Mark } from '@/components/ui/mark';
 import { Text } from '@/components/ui/text';
 import { useUnits } from '@/hooks/use-units';
 
-import { airText, reachWords, situationText, type SetName } from './place-words';
+import { airText, reachWords, type SetName } from './place-words';
 
 type PlaceTableProps = { jobId: string; places: readonly Place[] };
 type Reader = ReturnType<typeof useUnits>;
@@ -34,8 +34,8 @@ function columnsFor({ units, show, unitLabel }: Reader): readonly Column<Place>[
   });
   return [
     { key: 'name', label: 'Place', cell: ({ name }) => name },
-    { key: 'where', label: 'Where', cell: (place) => <Text tone="inkSoft">{situationText(place)}</Text> },
-    { key: 'reach', label: 'Within reach of', cell: ({ reach }) => <Text>{reachWords[reach]}</Text> },
+    { key: 'where', label: 'Where', cell: (place) => <Text noWrap>{differenceText(place)}</Text> },
+    { key: 'reach', label: 'Within reach of', cell: ({ reach }) => <Text noWrap>{reachWords[reach]}</Text> },
     {
       key: 'touch',
       label: 'Touch limit',
@@ -52,6 +52,10 @@ function columnsFor({ units, show, unitLabel }: Reader): readonly Column<Place>[
     air('mean', 'Mean'),
   ];
 }
+
+/** Only what sets a place apart: most are indoors. */
+const differenceText = ({ outdoor, plenum }: Place): string =>
+  [...(outdoor ? ['outdoors'] : []), ...(plenum ? ['air plenum'] : [])].join(', ');
 
 function Limit({ isOpen, text }: { isOpen: boolean; text: string }) {
   if (text)

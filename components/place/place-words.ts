@@ -1,5 +1,5 @@
 import type { ConditionsOfPlace, Place, PlaceInput } from '@/api/contracts/place';
-import { showWithUnit, type UnitSystem } from '@/api/contracts/quantities';
+import { inUnits, showWithUnit, type QuantityKind, type UnitSystem } from '@/api/contracts/quantities';
 
 export type SetName = keyof PlaceInput['conditions'];
 
@@ -22,19 +22,20 @@ export const reachWords: Record<Place['reach'], string> = {
 
 /** "32 °C", "28 °C at 75%", "−12 °C, wind 6 m/s": only what was given. */
 export function airText({ air, humidity, wind }: ConditionsOfPlace, units: UnitSystem): string {
-  const degrees = showWithUnit('temperature', air.value, { units, digits: digitsOf(air.value, units) });
+  const degrees = degreesText(air.value, units);
   const damp = humidity ? ` at ${showWithUnit('humidity', humidity.value, { units })}` : '';
-  const windy = wind.value > 0 ? `, wind ${showWithUnit('speed', wind.value, { units })}` : '';
+  const windy = wind.value > 0 ? `, wind ${plainText('speed', wind.value, units)}` : '';
   return `${degrees}${damp}${windy}`;
 }
 
-const digitsOf = (celsius: number, units: UnitSystem) => {
-  const shown = units === 'SI' ? celsius : celsius * 1.8 + 32;
-  return Math.abs(shown - Math.round(shown)) < 0.05 ? 0 : 1;
-};
+/** A value with its unit, and a decimal only where there is one. */
+export function plainText(kind: QuantityKind, value: number, units: UnitSystem): string {
+  const shown = inUnits(kind, value, units);
+  const digits = Math.abs(shown - Math.round(shown)) < 0.05 ? 0 : 1;
+  return showWithUnit(kind, value, { units, digits });
+}
 
-export const degreesText = (celsius: number, units: UnitSystem): string =>
-  showWithUnit('temperature', celsius, { units, digits: digitsOf(celsius, units) });
+export const degreesText = (celsius: number, units: UnitSystem): string => plainText('temperature', celsius, units);
 
 /** "Trained people, 60 °C", "Out of reach". */
 export function touchText({ reach, touchLimit }: Pick<Place, 'reach' | 'touchLimit'>, units: UnitSystem): string {

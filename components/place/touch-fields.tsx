@@ -25,8 +25,8 @@ const segments = [
 export function TouchFields({ form }: TouchFieldsProps) {
   const { control, getValues, setValue } = form;
   const { data: safety } = useSafety();
-  const reach = useWatch({ control, name: 'reach' });
-  const suggestions = touchSuggestions(reach, safety);
+  const [reach, limit] = useWatch({ control, name: ['reach', 'touchLimit'] });
+  const suggestions = touchSuggestions(reach, safety).filter((one) => one.limit !== limit?.value);
   const take = (suggestion: TouchSuggestion) => {
     const put = { shouldDirty: true, shouldValidate: true };
     setValue('touchLimit', { value: suggestion.limit }, put);
@@ -55,7 +55,7 @@ export function TouchFields({ form }: TouchFieldsProps) {
       />
       {reach === 'nobody' ? null : (
         <>
-          <Grid column={220}>
+          <Grid column={320}>
             <FormQuantityField
               control={control}
               name="touchLimit"
@@ -72,19 +72,21 @@ export function TouchFields({ form }: TouchFieldsProps) {
   );
 }
 
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
 type SuggestionsProps = { suggestions: readonly TouchSuggestion[]; onTake: (suggestion: TouchSuggestion) => void };
 
 function Suggestions({ suggestions, onTake }: SuggestionsProps) {
   const { units } = useUnits();
   return (
-    <Stack gap="xs">
+    <Stack gap="sm">
       {suggestions.map((suggestion) => (
         <Row key={suggestion.id} wrap={false}>
           <Button label={`Use ${degreesText(suggestion.limit, units)}`} onPress={() => onTake(suggestion)} />
           <Stack gap="xxs" grow>
-            <Text size="small">{suggestion.where}</Text>
+            <Text size="small">{capital(suggestion.where)}</Text>
             <Text size="small" tone="inkSoft">
-              {`${suggestion.basis}. ${suggestion.source}`}
+              {`${capital(suggestion.basis)}. ${suggestion.source}`}
             </Text>
           </Stack>
         </Row>

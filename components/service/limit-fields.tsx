@@ -33,8 +33,7 @@ export function LimitFields({ form, places }: LimitFieldsProps) {
         return (
           <View key={kind}>
             <Checkbox
-              label={title}
-              hint={asks}
+              label={`${title}: ${asks}`}
               checked={index >= 0}
               onChange={(applies) => (applies ? append(blankLimit(kind, null)) : remove(index))}
             />
@@ -159,6 +158,6 @@ function PlacedLimit({ form, index, places, onKind, onRemove }: PlacedLimitProps
 }
 
 const styles = StyleSheet.create({
-  values: { paddingLeft: 36, paddingBottom: space.xs, maxWidth: 520 },
+  values: { paddingLeft: 36, paddingBottom: space.xs, maxWidth: 560 },
   start: { alignItems: 'flex-start', paddingTop: space.xs },
 });

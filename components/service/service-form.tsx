@@ -52,7 +52,7 @@ export function ServiceForm(props: ServiceFormProps) {
       onCancel={onCancel}
       actions={actions}
     >
-      <Grid column={260}>
+      <Grid column={320}>
         <FormTextField control={control} name="name" label="Name" hint="As the specification calls it" />
         <FormTextField
           control={control}
@@ -63,7 +63,8 @@ export function ServiceForm(props: ServiceFormProps) {
       </Grid>
       <StateFields form={form} />
       <Notice tone="note">
-        Hot-water and cold-water temperatures follow the water-safety plan: do not choose them here.
+        Hot and cold drinking water: enter the temperatures of the water-safety plan, never others for the insulation’s
+        sake.
       </Notice>
       <LimitFields form={form} places={places} />
       <Grid column={180}>

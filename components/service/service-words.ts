@@ -1,7 +1,7 @@
 import type { FluidStateOfService, Service, ServiceLimit } from '@/api/contracts/service';
-import { showWithUnit, type UnitSystem } from '@/api/contracts/quantities';
+import type { UnitSystem } from '@/api/contracts/quantities';
 
-import { degreesText } from '@/components/place/place-words';
+import { degreesText, plainText } from '@/components/place/place-words';
 
 export const natureWords = { hot: 'hot', cold: 'cold' } as const;
 
@@ -23,26 +23,25 @@ export const serviceLimitWords: readonly LimitWords[] = [
   {
     kind: 'touch',
     title: 'Touch',
-    asks: "The surface stays at or below the place's touch limit, where people can reach it.",
+    asks: "the surface stays at or below the place's touch limit, where people can reach it",
   },
-  { kind: 'dew-point', title: 'Dew point', asks: 'The surface stays above the dew point, so that it does not sweat.' },
-  { kind: 'energy-code', title: 'Energy code', asks: "The thickness meets the table of the job's code edition." },
-  { kind: 'heat-flow', title: 'Heat flow', asks: 'The heat lost or gained stays within a figure of its own.' },
-  { kind: 'material', title: 'Material', asks: 'Every layer and the finish stay within their temperature limits.' },
+  { kind: 'dew-point', title: 'Dew point', asks: 'the surface stays above the dew point, so that it does not sweat' },
+  { kind: 'energy-code', title: 'Energy code', asks: "the thickness meets the table of the job's code edition" },
+  { kind: 'heat-flow', title: 'Heat flow', asks: 'the heat lost or gained stays within a figure of its own' },
+  { kind: 'material', title: 'Material', asks: 'every layer and the finish stay within their temperature limits' },
 ];
 
 /** "dew point + 1 K", "heat flow 20 W/m", "touch". */
 export function limitText(limit: ServiceLimit, units: UnitSystem): string {
-  if (limit.kind === 'dew-point')
-    return `dew point + ${showWithUnit('difference', limit.margin.value, { units, digits: 1 }).replace('.0', '')}`;
+  if (limit.kind === 'dew-point') return `dew point + ${plainText('difference', limit.margin.value, units)}`;
   if (limit.kind === 'heat-flow') return `heat flow ${flowText(limit, units)}`;
   return { touch: 'touch', 'energy-code': 'energy code', material: 'material' }[limit.kind];
 }
 
 function flowText({ perLength, flux }: Extract<ServiceLimit, { kind: 'heat-flow' }>, units: UnitSystem): string {
   return [
-    ...(perLength ? [showWithUnit('heatPerLength', perLength.value, { units })] : []),
-    ...(flux ? [showWithUnit('heatFlux', flux.value, { units })] : []),
+    ...(perLength ? [plainText('heatPerLength', perLength.value, units)] : []),
+    ...(flux ? [plainText('heatFlux', flux.value, units)] : []),
   ].join(' or ');
 }
 

@@ -33,7 +33,7 @@ export function StateFields({ form }: StateFieldsProps) {
       {fields.map(({ id }, index) => (
         <Stack key={id} gap="xs" role="group" aria-label={stateTitle(states[index]?.nature, nature)}>
           {nature === 'both' ? <Text weight="strong">{stateTitle(states[index]?.nature, nature)}</Text> : null}
-          <Grid column={150} gap="sm">
+          <Grid column={104} gap="sm">
             {temperatures.map(({ part, label, hint }) => (
               <FormQuantityField
                 key={part}

@@ -8,6 +8,7 @@ import { coveringFacts } from '@/components/build-up/covering-words';
 import { FormTextField } from '@/components/forms/form-text-field';
 import { RowForm } from '@/components/forms/row-form';
 import { useRowForm } from '@/components/forms/use-row-form';
+import { Grid } from '@/components/ui/stack';
 import { useSpecificationActions } from '@/hooks/use-specification';
 
 type SpecificationFormProps = {
@@ -44,12 +45,14 @@ export function SpecificationForm(props: SpecificationFormProps) {
         onCancel={onCancel}
         actions={actions}
       >
-        <FormTextField
-          control={editing.form.control}
-          name="label"
-          label="Row"
-          hint="Its number or letter in the table as handed down"
-        />
+        <Grid column={320}>
+          <FormTextField
+            control={editing.form.control}
+            name="label"
+            label="Row"
+            hint="Its number or letter in the table as handed down"
+          />
+        </Grid>
         <CoveringFields {...choices} isOutermostOpen={false} />
       </RowForm>
     </FormProvider>

@@ -1,4 +1,5 @@
 import type { SpecificationRow } from '@/api/contracts/build-up';
+import { CoveringGlyph } from '@/components/build-up/covering-glyph';
 import { coveringColumns } from '@/components/build-up/build-up-table';
 import { nameIn, type CoveringNames } from '@/components/build-up/covering-words';
 import { DataTable, type Column } from '@/components/ui/data-table';
@@ -22,6 +23,13 @@ export function SpecificationTable({ jobId, rows, names }: SpecificationTablePro
 }
 
 const columnsFor = (names: CoveringNames): Column<SpecificationRow>[] => [
+  {
+    key: 'section',
+    label: 'Section',
+    hideLabel: true,
+    width: 44,
+    cell: (row) => <CoveringGlyph row={row} names={names} />,
+  },
   { key: 'label', label: 'Row', cell: ({ label }) => label },
   {
     key: 'service',

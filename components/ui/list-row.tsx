@@ -57,7 +57,7 @@ function ListRow({
   const colours = { borderBottomColor: theme.rule, borderLeftColor: isChosen ? theme.oxide : 'transparent' };
   return (
     <LinkArea href={href} current={isChosen}>
-      <View style={[styles.row, flush ? styles.flush : colours, isChosen && { backgroundColor: theme.sheet }]}>
+      <View style={[styles.row, colours, flush && styles.flush, isChosen && { backgroundColor: theme.sheet }]}>
         {glyph ? <View style={styles.glyph}>{glyph}</View> : null}
         <View style={styles.words}>
           <Text weight="strong">{title}</Text>
@@ -91,7 +91,7 @@ const styles = StyleSheet.create({
     borderLeftWidth: 3,
     borderBottomWidth: hairline,
   },
-  flush: { paddingLeft: 0, paddingRight: space.xs, borderLeftWidth: 0, borderBottomWidth: 0 },
+  flush: { paddingLeft: 0, paddingRight: space.xs, borderLeftWidth: 0 },
   glyph: { flexShrink: 0 },
   words: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
   aside: { flexShrink: 0, maxWidth: '40%' },

@@ -9,8 +9,8 @@ import {
 
 // NPS and DN of the same size: ASME B36.10M.
 const sizes = [
-  { dn: 40, nominal: 'NPS 1-1/2' },
-  { dn: 200, nominal: 'NPS 8' },
+  { dn: 40, nominal: 'NPS 1-1/2', outsideDiameter: 0.0483 },
+  { dn: 200, nominal: 'NPS 8', outsideDiameter: 0.2191 },
 ];
 const materials = [
   { id: 'std/mf_pipe', name: 'Mineral fibre pipe section (glass or rock wool)' },
@@ -26,7 +26,7 @@ describe('a band of sizes', () => {
     [40, null, 'SI', 'DN 40 and over'],
     [null, 40, 'IP', 'up to NPS 1-1/2'],
     [40, 40, 'SI', 'DN 40'],
-    [null, null, 'SI', 'All sizes'],
+    [null, null, 'SI', 'All pipe sizes'],
     // no NPS is listed for it: its DN stands
     [33, 33, 'IP', 'DN 33'],
   ] as const)('%s to %s in %s reads %s', (from, to, units, text) => {

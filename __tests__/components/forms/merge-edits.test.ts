@@ -25,10 +25,12 @@ it('keeps mine where both changed the same', () => {
 });
 
 it('never mixes the value of one with the words of another', () => {
-  const typed = { value: 10, typed: { text: '50', unit: '°F' } };
-  const before = { air: { value: 9 } };
-  expect(mergeEdits(before, { air: { value: 9, typed: { text: '9', unit: '°C' } } }, { air: typed }).air.value).toBe(9);
-  expect(mergeEdits(before, before, { air: typed })).toEqual({ air: typed });
+  type Place = { air: { value: number; typed?: { text: string; unit: string } } };
+  const before: Place = { air: { value: 9 } };
+  const mine: Place = { air: { value: 9, typed: { text: '9', unit: '°C' } } };
+  const theirs: Place = { air: { value: 10, typed: { text: '50', unit: '°F' } } };
+  expect(mergeEdits(before, mine, theirs)).toEqual(mine);
+  expect(mergeEdits(before, before, theirs)).toEqual(theirs);
 });
 
 it('compares what is said, not how it is written', () => {

@@ -12,7 +12,7 @@ describe('air', () => {
   it('reads in the units of the reader, with what was given and nothing else', () => {
     expect(airText(air(32), 'SI')).toBe('32 °C');
     expect(airText(air(28, { humidity: 75 }), 'SI')).toBe('28 °C at 75%');
-    expect(airText(air(-12, { wind: 6 }), 'SI')).toBe('−12 °C, wind 6.0 m/s');
+    expect(airText(air(-12, { wind: 6 }), 'SI')).toBe('−12 °C, wind 6 m/s');
     expect(airText(air(-12, { wind: 6 }), 'IP')).toBe('10.4 °F, wind 13.4 mph');
     expect(airText(air(30), 'IP')).toBe('86 °F');
   });

@@ -21,6 +21,6 @@ it('lists the limits that hold everywhere, then those of one place', () => {
     { kind: 'material', placeId: null } as const,
     { kind: 'heat-flow', placeId: 'roof', perLength: { value: 20 }, flux: null } as const,
   ];
-  expect(limitsText({ limits }, places, 'SI')).toBe('dew point + 1 K, material; heat flow 20.0 W/m in Roof, outdoors');
+  expect(limitsText({ limits }, places, 'SI')).toBe('dew point + 1 K, material; heat flow 20 W/m in Roof, outdoors');
   expect(limitsText({ limits: [] }, places, 'SI')).toBe('no limit');
 });

@@ -4,8 +4,10 @@ import type { Addendum, Drawing, Level } from '@/api/contracts/basis';
 import type { BuildUp, SpecificationRow } from '@/api/contracts/build-up';
 import type { Place } from '@/api/contracts/place';
 import type { Service } from '@/api/contracts/service';
+import { CoveringGlyph } from '@/components/build-up/covering-glyph';
 import {
   bandText,
+  bodyWords,
   materialsText,
   nameIn,
   placesText,
@@ -13,7 +15,7 @@ import {
   thicknessesText,
   type CoveringNames,
 } from '@/components/build-up/covering-words';
-import { airText, situationText, touchText } from '@/components/place/place-words';
+import { airText, degreesText, reachWords, situationText } from '@/components/place/place-words';
 import { limitsText, operatingText } from '@/components/service/service-words';
 import type { ListItem } from '@/components/ui/list-row';
 
@@ -49,8 +51,8 @@ export function placesSection(jobId: string, places: readonly Place[], { units }
     items: places.map((place) => ({
       key: place.id,
       title: place.name,
-      text: `${situationText(place)} · hottest ${airText(place.conditions.hottest, units)} · most humid ${airText(place.conditions.mostHumid, units)}`,
-      aside: touchText(place, units),
+      text: `${situationText(place)} · ${reachWords[place.reach].toLowerCase()} · humid ${airText(place.conditions.mostHumid, units)}`,
+      aside: place.touchLimit && place.reach !== 'nobody' ? degreesText(place.touchLimit.value, units) : '',
       href: one(place.id),
     })),
   };
@@ -69,6 +71,7 @@ export function servicesSection(jobId: string, services: readonly Service[], nam
       title: service.name,
       text: limitsText(service, names.places, names.units),
       aside: operatingText(service.states, names.units),
+      tone: service.states.length === 1 ? service.states[0]?.nature : undefined,
       href: one(service.id),
     })),
   };
@@ -102,7 +105,13 @@ export function specificationSection(jobId: string, rows: SpecificationRows, nam
     gap: uncoveredServices(rows.services, [...rows.specification, ...rows.buildUps]),
     items: rows.specification.map((row) => {
       const item = coveringItem(row, names);
-      return { key: row.id, ...item, title: `${row.label} · ${item.title}`, href: one(row.id) };
+      return {
+        key: row.id,
+        ...item,
+        title: `${row.label} · ${item.title}`,
+        glyph: <CoveringGlyph row={row} names={names} />,
+        href: one(row.id),
+      };
     }),
   };
 }
@@ -111,8 +120,8 @@ function coveringItem(row: BuildUp, names: CoveringNames): Pick<ListItem, 'title
   const finish = shortName(nameIn(names.finishes, row.finishId));
   return {
     title: nameIn(names.services, row.serviceId),
-    text: `${bandText(row, names)} · ${placesText(row.placeIds, names.places)} · ${materialsText(row.layers, names.materials)}, ${finish}`,
-    aside: thicknessesText(row.layers, names.units),
+    text: `${row.appliesTo === 'pipe' ? bandText(row, names) : bodyWords[row.appliesTo]} · ${placesText(row.placeIds, names.places)} · ${materialsText(row.layers, names.materials)}, ${finish}`,
+    aside: row.layers.at(-1)?.thickness === null ? '' : thicknessesText(row.layers, names.units),
   };
 }
 

@@ -1,0 +1,18 @@
+import { Section } from '@/components/diagram/section';
+
+type MaterialGlyphProps = { materialId: string; size: 28 | 120; isClosed: boolean; label?: string };
+
+/** A material's own hatch, as it is drawn everywhere: 51 mm of it on a DN 50 pipe. */
+export const MaterialGlyph = ({ materialId, size, isClosed, label }: MaterialGlyphProps) => (
+  <Section
+    drawn={{
+      shape: 'cylinder',
+      width: 0.0603,
+      height: 0.0603,
+      layers: [{ materialId, thickness: 0.0508 }],
+      nature: isClosed ? 'cold' : 'hot',
+    }}
+    size={size}
+    label={label}
+  />
+);
