@@ -76,13 +76,17 @@ function printHead({ press, snapshot, titles }: Framed): void {
     y: 49,
     style: styles.note,
   });
-  press.line(titles.issue, {
-    ...right,
-    y: 34,
-    style: titles.draft ? { ...styles.bodyStrong, colour: ink.fail } : styles.bodyStrong,
-  });
+  printIssue(press, titles);
   press.line(titles.dates, { ...right, y: 49, style: styles.note });
   hairline(press, 73, { colour: ink.text, width: 1.4 });
+}
+
+/** A draft's name stands white on a dark field: no copier loses it. */
+function printIssue(press: Press, { issue, draft }: Titles): void {
+  const style = draft ? { ...styles.bodyStrong, colour: ink.sheet } : styles.bodyStrong;
+  const width = press.wrap.width(issue, style);
+  if (draft) press.document.roundedRect(body.right - width - 6, 33, width + 12, 15.5, 3).fill(ink.fail);
+  press.line(issue, { x: body.right, y: 34, style, align: 'right' });
 }
 
 type Block = { style: (typeof styles)[keyof typeof styles]; width: number };

@@ -31,11 +31,11 @@ export function printSchedule(sheet: Sheet): void {
 const glyph = 36;
 const columns = [
   { title: '', width: glyph },
-  { title: 'Service and size', share: 1.05 },
+  { title: 'Service and size', share: 1.1 },
   { title: 'Place and runs', share: 0.9 },
-  { title: 'Material and finish', share: 1.25 },
+  { title: 'Material and finish', share: 1.15 },
   { title: 'mm', width: 60, align: 'right' as const },
-  { title: 'From, and what decides', share: 1.25 },
+  { title: 'From, and what decides', share: 1.5 },
 ];
 
 function scheduleRow(sheet: Sheet, row: ScheduleRow): Row {
