@@ -7,6 +7,7 @@ import { judgeDewPoint } from './dew-point';
 import { judgeEnergyCode } from './energy-code';
 import { judgeHeatFlow } from './heat-flow';
 import { judgeMaterial } from './material';
+import { plasticNote, plasticWall } from './plastic-wall';
 import { sentenceOf, whyNotThinnerOf } from './sentences';
 import type { Candidate, Conditions, LimitInput, LimitVerdict, Study, StudyInput } from './study-types';
 import { judgeTouch } from './touch';
@@ -51,7 +52,7 @@ export function candidateOf(input: StudyInput, build: Build): Candidate {
     heat,
     verdicts,
     meetsAll: meetsAll(verdicts),
-    notes: [...build.notes, ...layerNotes(build)],
+    notes: [...build.notes, ...layerNotes(build), ...wallNotes(input)],
   };
 }
 
@@ -75,6 +76,11 @@ const usualLayer = 0.0762; // m; thicker is usually put up in two layers, common
 
 const layerNotes = ({ names, thicknesses }: Build): string[] =>
   names.length === 1 && (thicknesses[0] ?? 0) > usualLayer + 0.01 ? ['Usually put up in two layers.'] : [];
+
+function wallNotes({ body }: StudyInput): string[] {
+  const wall = plasticWall(body);
+  return wall ? [plasticNote(wall)] : [];
+}
 
 function studyNotes({ place, limits, states, method, body, codeExempt }: StudyInput): string[] {
   const has = (kind: LimitInput['kind']) => limits.some((limit) => limit.kind === kind);

@@ -1,8 +1,9 @@
 import { EngineError } from '../engine-error';
-import type { HeatCase, HeatResult } from '../heat/heat-case';
+import type { HeatCase, HeatLayer, HeatResult } from '../heat/heat-case';
 import { solve } from '../heat/solve';
 import { bareSurface } from './bare-surface';
 import { type Build, wholeThickness } from './build';
+import { plasticWall, withoutWall } from './plastic-wall';
 import type { Body, ConditionSet, HeatAnswer, JudgedAt, Orientation, StudyInput } from './study-types';
 
 /** What a surface is asked under: a fluid temperature [°C], a set of air, and which emittance. */
@@ -55,7 +56,7 @@ export function heatShapeOf(body: Body, build: Build): HeatShapeOfBody {
   const thickness = wholeThickness(build);
   switch (body.shape) {
     case 'pipe':
-      return cylinder(body, { outsideDiameter: body.outsideDiameter, height: body.height ?? undefined, layers });
+      return cylinder(body, { ...onPlastic(body, layers), height: body.height ?? undefined });
     case 'round-duct':
       return { shape: 'horizontal-cylinder', outsideDiameter: body.diameter, height: undefined, layers };
     case 'rectangular-duct':
@@ -65,6 +66,12 @@ export function heatShapeOf(body: Body, build: Build): HeatShapeOfBody {
     case 'flat':
       return { shape: 'vertical-flat', outsideDiameter: undefined, height: body.height, layers };
   }
+}
+
+function onPlastic(body: Extract<Body, { shape: 'pipe' }>, layers: readonly HeatLayer[]) {
+  const wall = plasticWall(body);
+  if (!wall) return { outsideDiameter: body.outsideDiameter, layers };
+  return { outsideDiameter: body.outsideDiameter - 2 * wall.thickness, layers: [wall, ...layers] };
 }
 
 const cylinder = (
@@ -92,9 +99,9 @@ export const heatCaseOf = (
   surface: method,
 });
 
-function solveNamed({ place }: StudyInput, { set }: JudgedAt, heatCase: HeatCase): HeatResult {
+function solveNamed({ place, body }: StudyInput, { set }: JudgedAt, heatCase: HeatCase): HeatResult {
   try {
-    return solve(heatCase);
+    return plasticWall(body) ? withoutWall(solve(heatCase)) : solve(heatCase);
   } catch (error) {
     if (!(error instanceof EngineError)) throw error;
     throw new EngineError(`${place.name}, ${setWords[set]}: ${error.message}`, error.field);

@@ -32,15 +32,7 @@ function layerStep(build: Build, place: number, { result, heatCase }: Solved): W
   const difference = amount('difference', inner - outer);
   const filled: Words = isFlat
     ? [amount('conductivity', conductivity), ' × ', difference, ' / ', amount('dimension', thickness)]
-    : [
-        '2π × ',
-        amount('conductivity', conductivity),
-        ' × ',
-        difference,
-        ' / ln(',
-        ...radii(build, place, heatCase.outsideDiameter),
-        ')',
-      ];
+    : ['2π × ', amount('conductivity', conductivity), ' × ', difference, ' / ln(', ...radii(build, place), ')'];
   return {
     title: `Conduction, layer ${place + 1}`,
     equation: isFlat ? 'q″ = k̄ (T₁ − T₂) / t' : 'q′ = 2π k̄ (T₁ − T₂) / ln(r₂ / r₁)',
@@ -51,8 +43,9 @@ function layerStep(build: Build, place: number, { result, heatCase }: Solved): W
   };
 }
 
-function radii({ thicknesses }: Build, place: number, bare = NaN): Words {
-  const inside = bare / 2 + thicknesses.slice(0, place).reduce((sum, thickness) => sum + thickness, 0);
+function radii({ thicknesses, outsideDiameter }: Build, place: number): Words {
+  const outwards = thicknesses.slice(place).reduce((sum, thickness) => sum + thickness, 0);
+  const inside = (outsideDiameter ?? NaN) / 2 - outwards;
   return [amount('dimension', inside + (thicknesses[place] ?? NaN)), ' / ', amount('dimension', inside)];
 }
 
@@ -70,7 +63,7 @@ function layerInputs(build: Build, place: number, numbers: LayerNumbers): Workin
       symbol: 'T₁',
       meaning: 'inner side',
       value: [amount('temperature', numbers.inner, 2)],
-      source: place === 0 ? 'fluid, taken as the pipe’s surface' : 'solved',
+      source: place === 0 ? 'outer surface of the pipe: the fluid, less the drop through a plastic wall' : 'solved',
     },
     { symbol: 'T₂', meaning: 'outer side', value: [amount('temperature', numbers.outer, 2)], source: 'solved' },
     {

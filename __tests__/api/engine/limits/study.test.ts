@@ -203,3 +203,26 @@ describe('refusals name the case and the field', () => {
     expect(act).toThrow(message);
   });
 });
+
+describe('a plastic pipe', () => {
+  const plastic = { ...steamInput, states: [{ nature: 'hot', operating: 60, lowest: 55, highest: 70 }] as const };
+  const heatOf = (input: StudyInput) => {
+    const result = study(input);
+    return result.candidates[result.specified ?? NaN];
+  };
+
+  it('has its own wall counted: less heat than steel of the same diameter, and the wall is no layer', () => {
+    const cpvc = heatOf({ ...plastic, body: pipe('cpvc-ips', 'NPS 4') });
+    const iron = heatOf(plastic);
+    expect(cpvc?.heat.heatFlow).toBeLessThan(iron?.heat.heatFlow ?? NaN);
+    expect(cpvc?.heat.interfaces).toHaveLength(2);
+    expect(cpvc?.notes.join()).toContain('The wall of the plastic pipe is counted: 6.0 mm');
+  });
+
+  it('closes by the two resistances in series', () => {
+    const candidate = heatOf({ ...plastic, body: pipe('cpvc-ips', 'NPS 4') });
+    const [pipeSurface = NaN] = candidate?.heat.interfaces ?? [];
+    const wall = (2 * Math.PI * 0.14 * (60 - pipeSurface)) / Math.log(0.1143 / (0.1143 - 2 * 0.00602));
+    expect(wall).toBeCloseTo(candidate?.heat.heatFlow ?? NaN, 6);
+  });
+});
