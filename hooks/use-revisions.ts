@@ -1,3 +1,4 @@
+import { useEffect } from 'react';
 import useSWR, { useSWRConfig } from 'swr';
 
 import { messageSchema, revisionSchema, type Revision } from '@/api/contracts/revision';
@@ -9,11 +10,16 @@ const isMoving = ({ rendering, messages }: Revision) =>
 
 /** A job's frozen revisions, newest first; read again every second while one is being rendered or sent. */
 export function useRevisions(jobId: string) {
-  const { data, error, mutate } = useSWR<Revision[], RequestFailed>(
-    `/jobs/${jobId}/revisions`,
-    (path: string) => request(path, revisionSchema.array()),
-    { refreshInterval: (latest) => (latest?.some(isMoving) ? 1000 : 0) },
+  const { data, error, mutate } = useSWR<Revision[], RequestFailed>(`/jobs/${jobId}/revisions`, (path: string) =>
+    request(path, revisionSchema.array()),
   );
+  // not SWR's own interval: where it begins at none, it is never asked again
+  const moves = data?.some(isMoving) ?? false;
+  useEffect(() => {
+    if (!moves) return undefined;
+    const timer = setInterval(() => void mutate(), 1000);
+    return () => clearInterval(timer);
+  }, [moves, mutate]);
   return { revisions: data, problem: error?.problem, reload: () => void mutate() };
 }
 
