@@ -83,19 +83,19 @@ type PointProps = { point: StripPoint; ink: string; strong: boolean; label: stri
 
 function Point({ point, ink, strong, label, theme }: PointProps) {
   const { x, y, off, labelY } = point;
-  if (off) return <OffScale point={point} ink={ink} label={label} />;
+  if (off) return <OffScale point={point} ink={ink} />;
   return (
     <G>
       <Circle cx={x} cy={y} r={strong ? 5 : 3.5} fill={theme.paper} stroke={ink} strokeWidth={2} />
-      <Number x={x} y={labelY} strong={strong} fill={theme.ink} halo={theme.paper}>
+      <Figure x={x} y={labelY} strong={strong} fill={theme.ink} halo={theme.paper}>
         {label}
-      </Number>
+      </Figure>
     </G>
   );
 }
 
 /** Beyond the scale: an arrow at its edge that says which way, and the value. */
-function OffScale({ point: { x, y, off }, ink, label }: { point: StripPoint; ink: string; label: string }) {
+function OffScale({ point: { x, y, off, value }, ink }: { point: StripPoint; ink: string }) {
   const theme = useTheme();
   const up = off === 'above';
   const tip = up
@@ -104,17 +104,17 @@ function OffScale({ point: { x, y, off }, ink, label }: { point: StripPoint; ink
   return (
     <G>
       <Path d={tip} fill={ink} />
-      <Number x={x} y={up ? y + 8 : y - 20} fill={ink} halo={theme.paper}>
-        {label.replace(/\.\d+$/, '')}
-      </Number>
+      <Figure x={x} y={y + 8} fill={ink} halo={theme.paper}>
+        {`${Math.round(value)}`.replace('-', '−')}
+      </Figure>
     </G>
   );
 }
 
-type NumberProps = { x: number; y: number; fill: string; halo: string; strong?: boolean; children: string };
+type FigureProps = { x: number; y: number; fill: string; halo: string; strong?: boolean; children: string };
 
 /** Written twice: the first one in the paper's colour keeps lines away from the figures. */
-function Number({ x, y, fill, halo, strong = false, children }: NumberProps) {
+function Figure({ x, y, fill, halo, strong = false, children }: FigureProps) {
   const shared = {
     x,
     y: y + 4.5,

@@ -14,6 +14,7 @@ import { useUnits } from '@/hooks/use-units';
 
 import { candidateName, heatText } from './candidate-words';
 import { conditionsText } from './conditions-text';
+import { unbroken } from './unbroken';
 
 type JudgedAtProps = { candidate: Candidate; onWorking: (about: string) => void };
 
@@ -37,7 +38,7 @@ export function JudgedAt({ candidate, onWorking }: JudgedAtProps) {
         <Limit key={verdict.kind} verdict={verdict} onWorking={() => onWorking(verdict.kind)} />
       ))}
       <Line
-        term="Heat flow"
+        term={hasHeatLimit ? 'Heat flow in mean air' : 'Heat flow'}
         text={heatText(candidate, units, 1)}
         note={`${conditionsText(heat.judgedAt, units)}; ${heat.judgedAt.source}`}
         onWorking={() => onWorking(hasHeatLimit ? 'surface' : 'heat-flow')}
@@ -55,7 +56,7 @@ function Limit({ verdict, onWorking }: { verdict: LimitVerdict; onWorking: () =>
     <Line
       term={capital(limitWords[kind])}
       mark={isMarginal ? { verdict: 'caution', words: 'marginal' } : marks[verdict.verdict]}
-      text={sentence(wordsText(verdict.because, units))}
+      text={sentence(unbroken(wordsText(verdict.because, units)))}
       note={[...conditions, ...(source ? [source] : [])].join('; ')}
       onWorking={verdict.verdict === 'does-not-apply' ? undefined : onWorking}
     />

@@ -14,6 +14,7 @@ import { JudgedAt } from './judged-at';
 import { MainActions } from './main-actions';
 import { OtherActions } from './other-actions';
 import type { Standing } from './put-up';
+import { SectionDetail } from './section-detail';
 import { StudySentence } from './study-sentence';
 import { WhyNotThinner } from './why-not-thinner';
 import { WorkingDialog } from './working-dialog';
@@ -56,6 +57,7 @@ export function RunStudyView({ of, row, title, standing, selected, onSelect, may
         <View style={styles.judged}>{candidate ? <JudgedAt candidate={candidate} onWorking={setAbout} /> : null}</View>
         <View style={styles.why}>
           <WhyNotThinner runStudy={runStudy} />
+          <SectionDetail runStudy={runStudy} selected={selected} />
           <Cautions {...{ of, row }} />
         </View>
       </View>
@@ -89,5 +91,5 @@ const styles = StyleSheet.create({
   bleed: { marginHorizontal: -space.md },
   beside: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.xl, rowGap: space.lg },
   judged: { flexGrow: 3, flexShrink: 1, flexBasis: 400, minWidth: 0, maxWidth: 720 },
-  why: { flexGrow: 2, flexShrink: 1, flexBasis: 260, minWidth: 0, maxWidth: 560, gap: space.md },
+  why: { flexGrow: 2, flexShrink: 1, flexBasis: 290, minWidth: 0, maxWidth: 560, gap: space.lg },
 });

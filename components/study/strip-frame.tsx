@@ -37,29 +37,20 @@ export function StripAxis({ layout, width, unit, heatUnit }: StripAxisProps) {
   );
 }
 
-export type NamedLevel = { id: string; text: string; y: number; side: 'left' | 'right' };
+export type NamedLevel = { id: string; text: string; top: number; end: 'left' | 'right' };
 
 /** Names of the levels, over whatever part of the strip is in view. */
 export function LevelNames({ levels }: { levels: readonly NamedLevel[] }) {
   const theme = useTheme();
-  const lowest = Math.max(...levels.map(({ y }) => y));
-  return levels.map(({ id, text, y, side }) => {
-    // of two on one side the lower one is named below its line
-    const isBelow = y === lowest && levels.some((other) => other.side === side && other.y < y);
-    return (
-      <View
-        key={id}
-        aria-hidden
-        style={[styles.name, side === 'left' ? styles.left : styles.right, { top: isBelow ? y + 2 : y - 20 }]}
-      >
-        <View style={{ backgroundColor: theme.paper, opacity: 0.86 }}>
-          <Text size="small" tone="fail" weight="strong" noWrap>
-            {text}
-          </Text>
-        </View>
+  return levels.map(({ id, text, top, end }) => (
+    <View key={id} aria-hidden style={[styles.name, styles[end], { top }]}>
+      <View style={{ backgroundColor: theme.paper, opacity: 0.86 }}>
+        <Text size="small" tone="fail" weight="strong" noWrap>
+          {text}
+        </Text>
       </View>
-    );
-  });
+    </View>
+  ));
 }
 
 const styles = StyleSheet.create({

@@ -7,6 +7,7 @@ import { useUnits } from '@/hooks/use-units';
 
 import { candidateName } from './candidate-words';
 import { leadAndRest } from './lead';
+import { unbroken } from './unbroken';
 
 const governs: Record<NonNullable<RunStudy['study']['governing']>, string> = {
   touch: 'the touch limit',
@@ -22,7 +23,7 @@ type StudySentenceProps = { runStudy: RunStudy; size?: TypeSize };
 export function StudySentence({ runStudy: { study, used }, size = 'sentence' }: StudySentenceProps) {
   const { units } = useUnits();
   const stands = used !== null && study.candidates[used]?.meetsAll === true;
-  const [lead, rest] = leadAndRest(wordsText(study.sentence, units));
+  const [lead, rest] = leadAndRest(unbroken(wordsText(study.sentence, units)));
   const remedy = study.proposed !== null && study.proposed !== used ? study.candidates[study.proposed] : undefined;
   return (
     <Stack gap="xxs">

@@ -2,6 +2,7 @@ import { useLayoutEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { unitLabel } from '@/api/contracts/quantities';
+import { placeNames } from '@/api/geometry/level-names';
 import { strip, type StripLayout } from '@/api/geometry/strip';
 import { StripPlot } from '@/components/diagram/strip-plot';
 import { space } from '@/components/theme/tokens';
@@ -14,7 +15,7 @@ import { candidateName, heatKind, heatText } from './candidate-words';
 import { standingWords, type Standing } from './put-up';
 import { headroom, StripColumn } from './strip-column';
 import { columnText, levelText, stripFacts, type StripFacts } from './strip-facts';
-import { gutters, LevelNames, StripAxis } from './strip-frame';
+import { gutters, LevelNames, StripAxis, type NamedLevel } from './strip-frame';
 import { placeAfter } from './strip-keys';
 import type { StudiedRun } from './study-facts';
 
@@ -119,14 +120,20 @@ function reveal(scroll: HTMLDivElement | null, x: number): void {
 
 type Named = { layout: StripLayout; units: Parameters<typeof levelText>[1]; isPhone: boolean };
 
-/** A touch limit is named where the curve has left it behind, a dew point where it has not come up to it. */
-const namedLevels = ({ levels }: StripFacts, { layout, units, isPhone }: Named) =>
-  levels.map((level) => ({
-    id: level.id,
-    text: levelText(level, units),
-    y: layout.levels.find(({ id }) => id === level.id)?.y ?? 0,
-    side: isPhone || level.kind === 'dew-point' ? ('left' as const) : ('right' as const),
+/** A touch limit is named where the curve has left it behind, a dew point where it has not come up to it; on a phone always at the thumb's other side. */
+function namedLevels({ levels }: StripFacts, { layout, units, isPhone }: Named): NamedLevel[] {
+  const texts = levels.map((level) => ({ id: level.id, text: levelText(level, units) }));
+  const names = texts.map(({ id, text }) => ({ id, width: text.length * letter, end: endOf(id, isPhone) }));
+  return placeNames(layout, names).map((placed, index) => ({
+    ...placed,
+    end: isPhone ? 'left' : placed.end,
+    text: texts[index]?.text ?? '',
   }));
+}
+
+/** About how wide a letter of a name is. */
+const letter = 6.8;
+const endOf = (id: string, isPhone: boolean) => (isPhone || id !== 'touch' ? ('left' as const) : ('right' as const));
 
 const styles = StyleSheet.create({
   whole: { minWidth: 0 },

@@ -1,5 +1,6 @@
 import * as fc from 'fast-check';
 
+import { interfaceMarks, markRadius } from '@/api/geometry/interface-marks';
 import { extentOf, section, sectionToScale, type SectionInput } from '@/api/geometry/section';
 
 import { isWithin, outlineBox, pointsOf } from './path-points';
@@ -159,4 +160,19 @@ it('draws a bare pipe as a bore alone, and its edge is the jacket', () => {
   const bare = section(pipe([]), 28);
   expect(bare.layers).toEqual([]);
   expect(bare.jacket).toBe(bare.bore.outline);
+});
+
+it('numbers every interface apart from its neighbours, beside the interface and within the square', () => {
+  fc.assert(
+    fc.property(any, (drawn) => {
+      const drawing = section(drawn, 280);
+      const marks = interfaceMarks(drawing);
+      expect(marks.map(({ x }) => x)).toEqual(drawing.interfaces);
+      marks.forEach(({ markY }, index) => {
+        if (index > 0) expect(markY - marks[index - 1]!.markY).toBeGreaterThan(2 * markRadius);
+        expect(markY).toBeGreaterThan(markRadius);
+        expect(markY).toBeLessThan(280 - markRadius);
+      });
+    }),
+  );
 });

@@ -1,3 +1,4 @@
+import { placeNames } from '@/api/geometry/level-names';
 import { sectionToScale, type SectionInput } from '@/api/geometry/section';
 import { strip, type StripInput } from '@/api/geometry/strip';
 
@@ -87,4 +88,15 @@ it('leaves out what is not known', () => {
 
 it('scrolls rather than squeezes: columns keep their least width', () => {
   expect(strip(hot, { ...room, width: 390, least: 128 }).width).toBe(1280);
+});
+
+it('names a level where no number stands, else at its other end or under its line', () => {
+  const layout = strip(hot, room);
+  const [level] = layout.levels;
+  expect(placeNames(layout, [{ id: 'touch', width: 110, end: 'right' }])).toEqual([
+    { id: 'touch', end: 'right', top: level!.y - 20 },
+  ]);
+  const steady = strip({ ...hot, curves: [{ id: 'hottest', values: surfaces.map(() => 60.1) }] }, room);
+  const [beside] = placeNames(steady, [{ id: 'touch', width: 110, end: 'right' }]);
+  expect(beside!.top).toBe(steady.levels[0]!.y + 2);
 });
