@@ -35,7 +35,8 @@ export async function request<Shape>(
   if (!response.ok) {
     const problem = problemOf(answer, response.status);
     // The session ended under an open screen: asking for it again tells the gate.
-    if (problem.type === '/problems/sign-in' && path !== sessionPath) void mutate(sessionPath);
+    const asksForIt = path === sessionPath && (options.method ?? 'GET') === 'GET';
+    if (problem.type === '/problems/sign-in' && !asksForIt) void mutate(sessionPath);
     throw new RequestFailed(problem);
   }
   const parsed = schema.safeParse(answer);

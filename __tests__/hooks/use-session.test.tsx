@@ -20,7 +20,7 @@ function server(state: { signedIn: boolean; who?: typeof session }) {
   return fakeApi(({ path, method }) => {
     if (method === 'POST') state.signedIn = true;
     if (method === 'DELETE') state.signedIn = false;
-    if (method !== 'GET') return { status: 204 };
+    if (method === 'POST' || method === 'DELETE') return { status: 204 };
     if (!state.signedIn) return signedOut;
     return path === '/api/session' ? { status: 200, body: state.who ?? session } : { status: 200, body: ['R29'] };
   });
@@ -91,14 +91,17 @@ it('signs out and forgets, also when the session had ended by itself', async () 
   expect(result.current.session).toBeUndefined();
 });
 
-it('notices by any refused request that the session has ended', async () => {
+it.each([
+  ['/jobs', 'GET'],
+  ['/session', 'PATCH'],
+] as const)('notices by a refused %s that the session has ended', async (path, method) => {
   const state = { signedIn: true };
   server(state);
   // the app's own memory, which `request` knows
   const { result } = renderHook(useSession);
   await waitFor(() => expect(result.current.session).toBeDefined());
   state.signedIn = false;
-  await act(() => expect(request('/jobs', z.unknown())).rejects.toThrow('Sign in first'));
+  await act(() => expect(request(path, z.unknown(), { method })).rejects.toThrow('Sign in first'));
   await waitFor(() => expect(result.current.isSignedOut).toBe(true));
   expect(result.current.session?.member.name).toBe('Ines Varga');
 });

@@ -113,7 +113,7 @@ function BodyRow<Row>({ row, columns, href, chosen = false }: BodyRowProps<Row>)
   return (
     <Element
       tag="tr"
-      aria-selected={chosen || undefined}
+      aria-current={chosen || undefined}
       onClick={open}
       style={[href !== undefined && styles.pressable, chosen && { backgroundColor: theme.sheet }]}
     >
