@@ -72,7 +72,7 @@ export function DepartureDialog({ run, title, children, initial, finishes, chang
 
 /** Behind the dialog stands what the other one made of the run; what was typed here is still here. */
 function TheirsNotice({ run }: { run: Run }) {
-  const said = run.override ? ` Their reason: “${run.override.reason}”` : ' It is as specified now.';
+  const said = run.override ? ` Their reason: “${run.override.reason}”.` : ' It is as specified now.';
   return (
     <Notice title={`Someone else changed ${run.number} meanwhile`} urgent>
       {`The study behind this shows theirs.${said} What you typed is kept: save again to put yours in its place, or close this to leave theirs.`}
