@@ -43,6 +43,7 @@ export function openPress({ title, author, subject, language, madeAt }: Imprint)
       ModDate: madeAt,
     },
   });
+  // opened anew for each document: a font that another document used would leave its traces in the bytes
   for (const [name, file] of Object.entries(fontFiles)) document.registerFont(name, file);
   const printable = createPrintable(document);
   const wrap = createWrap(document, printable);
@@ -55,7 +56,8 @@ function printLine({ document, wrap }: Printing, text: string, { x, y, style, al
   const left = align === 'right' ? x - width : x;
   const baseline = y + style.leading / 2 + style.size * 0.34;
   document.font(style.font, style.size).fillColor(style.colour);
-  document.text(text, left, baseline, { lineBreak: false, baseline: 'alphabetic' });
+  // the space at the end prints nothing, and lets the last word be the one that was measured
+  document.text(`${text} `, left, baseline, { lineBreak: false, baseline: 'alphabetic' });
   // the types do not know `structParent`, by which a link is read out as one
   const annotation = { Border: [0, 0, 0], structParent: link };
   if (goTo) document.goTo(left, y, width, style.leading, goTo, annotation);

@@ -13,7 +13,8 @@ export function createWrap(document: PDFKit.PDFDocument, printable: Printable): 
     const key = `${font} ${word}`;
     const stored = known.get(key);
     if (stored !== undefined) return (stored * size) / 1000;
-    const width = document.font(font, 1000).widthOfString(word);
+    // pdfkit keeps a word's glyphs together with the space after it: measured so, they are set once
+    const width = document.font(font, 1000).widthOfString(`${word} `) - document.widthOfString(' ');
     known.set(key, width);
     return (width * size) / 1000;
   };
