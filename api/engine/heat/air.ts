@@ -1,5 +1,5 @@
-/** Thermal conductivity [W/(m·K)], kinematic viscosity [m²/s] and Prandtl number. */
-export type Air = { conductivity: number; viscosity: number; prandtl: number };
+/** Absolute temperature [K], thermal conductivity [W/(m·K)], kinematic viscosity [m²/s] and Prandtl number. */
+export type Air = { kelvin: number; conductivity: number; viscosity: number; prandtl: number };
 
 const molarMass = 28.97; // kg/kmol
 const gasConstant = 287.055; // J/(kg·K)
@@ -20,7 +20,7 @@ export function airAt(kelvin: number, pressureRatio: number): Air {
   const conductivity = (2.64638e-3 * power) / (kelvin + 245.4 * Math.exp(-27.631021115928547 / kelvin));
   const heatCapacity = (1000 * (28.11 + kelvin * (0.1967e-2 + kelvin * (0.4802e-5 - kelvin * 1.966e-9)))) / molarMass;
   const density = (seaLevelPressure * pressureRatio) / (gasConstant * kelvin);
-  return { conductivity, viscosity: dynamic / density, prandtl: (dynamic * heatCapacity) / conductivity };
+  return { kelvin, conductivity, viscosity: dynamic / density, prandtl: (dynamic * heatCapacity) / conductivity };
 }
 
 /**

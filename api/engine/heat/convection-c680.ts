@@ -20,46 +20,41 @@ import type { Convection, Surface } from './surface';
 export function c680Convection(surface: Surface): Convection {
   const { air, wind, pressureRatio } = surface;
   return (difference) => {
-    const film = air + difference / 2;
-    const properties = airAt(film, pressureRatio);
-    const natural = naturalCoefficient(surface, properties, { film, difference });
-    return wind > 0 ? combined(surface.shape, forcedCoefficient(surface, properties), natural) : natural;
+    const film = airAt(air + difference / 2, pressureRatio);
+    const natural = naturalCoefficient(surface, film, difference);
+    return wind > 0 ? combined(surface.power, forcedCoefficient(surface, film), natural) : natural;
   };
 }
 
-/** Natural part [W/(m²·K)], with air at the film temperature [K]. */
-export function naturalCoefficient(
-  { shape, diameter, length }: Surface,
-  air: Air,
-  { film, difference }: { film: number; difference: number },
-): number {
-  const on = shape === 'horizontal-cylinder' ? diameter : length;
-  const ra = rayleigh(air, film, { difference, length: on });
-  return (naturalNusselt(shape, ra, { prandtl: air.prandtl, difference }) * air.conductivity) / on;
+/** Natural part [W/(m²·K)], with air at film temperature. */
+export function naturalCoefficient(surface: Surface, film: Air, difference: number): number {
+  const ra = rayleigh(film, difference, surface.length);
+  return (naturalNusselt(surface, ra, { film, difference }) * film.conductivity) / surface.length;
 }
 
-function naturalNusselt(
-  shape: Surface['shape'],
-  ra: number,
-  { prandtl, difference }: { prandtl: number; difference: number },
-): number {
-  if (shape === 'horizontal-cylinder') return nusseltHorizontalCylinder(ra, prandtl);
-  if (shape === 'horizontal-flat-up') return nusseltHorizontalPlate(ra, difference > 0);
-  if (shape === 'horizontal-flat-down') return nusseltHorizontalPlate(ra, difference < 0);
-  return nusseltVerticalPlate(ra, prandtl);
+function naturalNusselt({ shape }: Surface, ra: number, at: { film: Air; difference: number }): number {
+  switch (shape) {
+    case 'horizontal-cylinder':
+      return nusseltHorizontalCylinder(ra, at.film.prandtl);
+    case 'horizontal-flat-up':
+      return nusseltHorizontalPlate(ra, at.difference > 0);
+    case 'horizontal-flat-down':
+      return nusseltHorizontalPlate(ra, at.difference < 0);
+    default:
+      return nusseltVerticalPlate(ra, at.film.prandtl);
+  }
 }
 
 /** Forced part [W/(m²·K)]. */
-export function forcedCoefficient({ shape, windLength, wind }: Surface, air: Air): number {
-  const reynolds = (wind * windLength) / air.viscosity;
-  const nusselt = shape.endsWith('cylinder') ? nusseltCrossFlow : nusseltPlate;
-  return (nusselt(reynolds, air.prandtl) * air.conductivity) / windLength;
+export function forcedCoefficient({ isCylinder, windLength, wind }: Surface, film: Air): number {
+  const reynolds = (wind * windLength) / film.viscosity;
+  const nusselt = isCylinder ? nusseltCrossFlow(reynolds, film.prandtl) : nusseltPlate(reynolds, film.prandtl);
+  return (nusselt * film.conductivity) / windLength;
 }
 
 /** Coefficients are combined, not Nusselt numbers: their lengths can differ. */
-export function combined(shape: Surface['shape'], forced: number, natural: number): number {
-  if (shape === 'horizontal-cylinder')
-    return Math.sqrt(Math.sqrt(forced * forced * forced * forced + natural * natural * natural * natural));
-  if (shape.startsWith('vertical')) return Math.cbrt(forced * forced * forced + natural * natural * natural);
-  return (forced ** 3.5 + natural ** 3.5) ** (2 / 7);
+function combined(power: Surface['power'], forced: number, natural: number): number {
+  if (power === 3) return Math.cbrt(forced * forced * forced + natural * natural * natural);
+  if (power === 3.5) return (forced ** 3.5 + natural ** 3.5) ** (2 / 7);
+  return Math.sqrt(Math.sqrt(forced * forced * forced * forced + natural * natural * natural * natural));
 }

@@ -19,17 +19,17 @@ export function isoConvection(surface: Surface): Convection {
 }
 
 /** Free part [W/(m²·K)]; horizontal flats are taken as walls of their characteristic length, which a note says. */
-export function isoFree({ shape, diameter, length }: Surface, difference: number): number {
+export function isoFree({ shape, length }: Surface, difference: number): number {
   if (shape === 'horizontal-cylinder') {
-    return isLaminar(diameter, difference) ? 1.25 * fourthRoot(difference / diameter) : 1.21 * Math.cbrt(difference);
+    return isLaminar(length, difference) ? 1.25 * fourthRoot(difference / length) : 1.21 * Math.cbrt(difference);
   }
   return isLaminar(length, difference) ? 1.32 * fourthRoot(difference / length) : 1.74 * Math.cbrt(difference);
 }
 
 /** Part that wind gives [W/(m²·K)]. */
-export function isoForced({ shape, windLength, wind }: Surface): number {
+export function isoForced({ isCylinder, windLength, wind }: Surface): number {
   const product = wind * windLength;
-  if (!shape.endsWith('cylinder')) {
+  if (!isCylinder) {
     return product <= 8 ? 3.96 * Math.sqrt(wind / windLength) : 5.76 * (wind ** 4 / windLength) ** (1 / 5);
   }
   return product <= 8.55e-3

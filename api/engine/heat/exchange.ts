@@ -37,7 +37,7 @@ export function exchangeOf(heatCase: HeatCase, surface: Surface): Exchange {
   const offset = surroundingsTemperature - airTemperature;
   const surroundings = surface.air + offset;
   const convective = choice === 'astm-c680' ? c680Convection(surface) : isoConvection(surface);
-  const radiative = (difference: number) => radiativeCoefficient(emittance, surface.air + difference, surroundings);
+  const radiative = radiationOf(emittance, surface.air, surroundings);
   return {
     flux: (difference) => convective(difference) * difference + radiative(difference) * (difference - offset),
     convective,
@@ -47,19 +47,39 @@ export function exchangeOf(heatCase: HeatCase, surface: Surface): Exchange {
   };
 }
 
-/** The finished surface of a case. */
+const radiationOf = (emittance: number, air: number, surroundings: number): Convection => {
+  return (difference) => radiativeCoefficient(emittance, air + difference, surroundings);
+};
+
+/** The finished surface of a case, on its finished diameter. */
 export function surfaceOf(heatCase: HeatCase, diameter: number): Surface {
-  const { shape, height = 0, characteristicLength = 0, windLength = 0 } = heatCase;
-  const { airTemperature, windSpeed = 0, altitude = 0 } = heatCase;
-  const isHorizontalFlat = shape.startsWith('horizontal-flat');
-  const alongWall = isHorizontalFlat ? windLength : height;
+  const { shape, airTemperature, windSpeed = 0, altitude = 0 } = heatCase;
+  const { isCylinder, power, length, windLength } = lengthsOf(heatCase, diameter);
   return {
     shape,
-    diameter,
-    length: isHorizontalFlat ? characteristicLength : height,
-    windLength: shape.endsWith('cylinder') ? diameter : alongWall,
+    isCylinder,
+    power,
+    length,
+    windLength,
     air: airTemperature + zeroCelsius,
     wind: windSpeed,
     pressureRatio: altitude === 0 ? 1 : pressureRatioAt(altitude),
   };
+}
+
+type Lengths = Pick<Surface, 'isCylinder' | 'power' | 'length' | 'windLength'>;
+
+function lengthsOf(heatCase: HeatCase, diameter: number): Lengths {
+  const { shape, height = 0, characteristicLength = 0, windLength = 0 } = heatCase;
+  switch (shape) {
+    case 'horizontal-cylinder':
+      return { isCylinder: true, power: 4, length: diameter, windLength: diameter };
+    case 'vertical-cylinder':
+      return { isCylinder: true, power: 3, length: height, windLength: diameter };
+    case 'vertical-flat':
+      return { isCylinder: false, power: 3, length: height, windLength: height };
+    case 'horizontal-flat-up':
+    case 'horizontal-flat-down':
+      return { isCylinder: false, power: 3.5, length: characteristicLength, windLength };
+  }
 }

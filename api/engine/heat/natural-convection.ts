@@ -6,19 +6,12 @@ const gravity = 9.80665; // m/s²
  * Rayleigh number Ra = g β ΔT L³ / (ν α), β = 1/T_film and α = ν / Pr
  *
  * @param air - at film temperature
- * @param film - film temperature [K]
  * @param difference - between surface and air, either sign [K]
  * @param length - L [m]
  * @source F. P. Incropera et al., Fundamentals of Heat and Mass Transfer, 6th ed., Wiley, 2007, sec. 9.2
  */
-export function rayleigh(
-  air: Air,
-  film: number,
-  { difference, length }: { difference: number; length: number },
-): number {
-  const cube = length * length * length;
-  return (gravity * Math.abs(difference) * cube * air.prandtl) / (film * air.viscosity * air.viscosity);
-}
+export const rayleigh = ({ kelvin, viscosity, prandtl }: Air, difference: number, length: number): number =>
+  (gravity * Math.abs(difference) * length * length * length * prandtl) / (kelvin * viscosity * viscosity);
 
 /**
  * Long horizontal cylinder, on its diameter: Nu = {0.60 + 0.387 Ra^(1/6) / [1 + (0.559/Pr)^(9/16)]^(8/27)}²

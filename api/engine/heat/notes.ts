@@ -54,14 +54,13 @@ function c680Notes(surface: Surface, difference: number): string[] {
   const film = surface.air + difference / 2;
   const air = airAt(film, surface.pressureRatio);
   const notes = [];
-  const length = surface.shape === 'horizontal-cylinder' ? surface.diameter : surface.length;
-  const ra = rayleigh(air, film, { difference, length });
+  const ra = rayleigh(air, difference, surface.length);
   const [least, most] = rayleighRanges[surface.shape];
   if (ra > most || (ra < least && difference !== 0)) {
     notes.push('The Rayleigh number lies outside the range stated for the natural convection formula.');
   }
   const reynolds = (surface.wind * surface.windLength) / air.viscosity;
-  if (surface.wind > 0 && surface.shape.endsWith('cylinder') && reynolds * air.prandtl < 0.2) {
+  if (surface.wind > 0 && surface.isCylinder && reynolds * air.prandtl < 0.2) {
     notes.push('The wind is too slow for the range stated for the forced convection formula.');
   }
   if (film < 200 || film > 700)

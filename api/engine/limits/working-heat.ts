@@ -131,10 +131,7 @@ function partInputs(trial: Trial, { result, heatCase, judgedAt }: Solved): Worki
   const difference = result.surfaceTemperature - judgedAt.air;
   const air = airAt(zeroCelsius + judgedAt.air + difference / 2, pressureRatioAt(trial.input.altitude));
   const isIso = trial.input.method === 'iso-12241';
-  const film = zeroCelsius + judgedAt.air + difference / 2;
-  const natural = isIso
-    ? isoFree(surface, Math.abs(difference))
-    : naturalCoefficient(surface, air, { film, difference });
+  const natural = isIso ? isoFree(surface, Math.abs(difference)) : naturalCoefficient(surface, air, difference);
   const part = (symbol: string, meaning: string, value: number): WorkingInput => ({
     symbol,
     meaning,
