@@ -9,6 +9,8 @@ import { Heading } from '@/components/ui/heading';
 import { Stack } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
 
+import { withStyleSheet } from './mail-frame';
+
 /** The mail as its reader gets it: the HTML without scripts, and the plain text. */
 export function MailPreviewCard({ preview }: { preview: MailPreview }) {
   const theme = useTheme();
@@ -16,7 +18,13 @@ export function MailPreviewCard({ preview }: { preview: MailPreview }) {
   return (
     <Stack gap="xs">
       <Heading level={3}>{preview.subject}</Heading>
-      <Element tag="iframe" title="The mail" sandbox="" srcDoc={preview.html} style={[styles.frame, frame]} />
+      <Element
+        tag="iframe"
+        title="The mail"
+        sandbox=""
+        srcDoc={withStyleSheet(preview.html)}
+        style={[styles.frame, frame]}
+      />
       <Text size="small" tone="inkSoft">
         In a mail program without HTML:
       </Text>
