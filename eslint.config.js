@@ -77,6 +77,21 @@ module.exports = defineConfig([
     files: ['app/**', 'knexfile.ts', 'playwright.config.ts', 'db/seeds/**'],
     rules: { 'import/no-default-export': 'off' },
   },
+  // what draws is one chunk of its own (components/drawing says why)
+  {
+    files: ['app/**', 'components/**'],
+    ignores: ['components/diagram/**', 'components/drawing/**', 'components/study/{strip-*,thickness-strip}.*'],
+    rules: {
+      '@typescript-eslint/no-restricted-imports': [
+        'error',
+        {
+          patterns: [
+            { group: ['react-native-svg', '@/components/diagram/**'], message: 'Take it from components/drawing.' },
+          ],
+        },
+      ],
+    },
+  },
   // the engine is pure: no package and no Node
   {
     files: ['api/engine/**'],

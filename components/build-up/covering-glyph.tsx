@@ -1,6 +1,6 @@
 import type { BuildUp } from '@/api/contracts/build-up';
 import type { SectionInput } from '@/api/geometry/section';
-import { Section } from '@/components/diagram/section';
+import { DrawnSection } from '@/components/drawing/drawn';
 
 import type { CoveringNames } from './covering-words';
 import { metresOf } from './layer-options';
@@ -11,7 +11,7 @@ type Names = Pick<CoveringNames, 'services' | 'sizes'>;
 /** What a row puts up, drawn on the smallest of its sizes; nothing where a thickness is still to be found. */
 export function CoveringGlyph({ row, names }: { row: Covering; names: Names }) {
   const drawn = drawnCovering(row, names);
-  return drawn ? <Section drawn={drawn} size={28} /> : null;
+  return drawn ? <DrawnSection drawn={drawn} size={28} /> : null;
 }
 
 export function drawnCovering(row: Covering, { services, sizes }: Names): SectionInput | null {

@@ -7,6 +7,7 @@ const load = () => import('./drawings');
 export const fetchDrawings = (): void => void load().catch(() => undefined);
 
 const CurveChart = lazy(() => load().then((drawings) => ({ default: drawings.CurveChart })));
+const NumberedSection = lazy(() => load().then((drawings) => ({ default: drawings.NumberedSection })));
 const Section = lazy(() => load().then((drawings) => ({ default: drawings.Section })));
 const ThicknessStrip = lazy(() => load().then((drawings) => ({ default: drawings.ThicknessStrip })));
 
@@ -14,6 +15,13 @@ const ThicknessStrip = lazy(() => load().then((drawings) => ({ default: drawings
 export const DrawnSection = (props: ComponentProps<typeof Section>) => (
   <Suspense fallback={<View style={{ width: props.size, height: props.size }} />}>
     <Section {...props} />
+  </Suspense>
+);
+
+/** A section, large, with its interfaces numbered. */
+export const DrawnNumberedSection = (props: ComponentProps<typeof NumberedSection>) => (
+  <Suspense fallback={<View style={{ width: 280, height: 280 }} />}>
+    <NumberedSection {...props} />
   </Suspense>
 );
 

@@ -1,6 +1,6 @@
 import { StyleSheet, View } from 'react-native';
 
-import { NumberedSection } from '@/components/diagram/numbered-section';
+import { DrawnNumberedSection } from '@/components/drawing/drawn';
 import { space } from '@/components/theme/tokens';
 import { Heading } from '@/components/ui/heading';
 import { Row, Stack } from '@/components/ui/stack';
@@ -29,7 +29,7 @@ export function SectionDetail({ runStudy, selected }: { runStudy: StudiedRun; se
     <Stack gap="xs">
       <Heading>{name === 'bare' ? 'Bare, in section' : `${name} in section`}</Heading>
       <View style={styles.beside}>
-        <NumberedSection drawn={drawn} label={`Section to scale, ${name}`} />
+        <DrawnNumberedSection drawn={drawn} label={`Section to scale, ${name}`} />
         <View role="list" style={styles.list}>
           {interfaces.map((temperature, index) => (
             <View role="listitem" key={placeOf(index)}>
