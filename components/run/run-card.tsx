@@ -25,7 +25,7 @@ export function RunCard({ row, units }: { row: RunRow; units: UnitSystem }) {
       <View style={[styles.card, { borderBottomColor: theme.rule }]}>
         <RunGlyph judged={judged} />
         <View style={styles.words}>
-          <Text lines={1}>
+          <Text lines={2}>
             <Words weight="strong">{service?.name ?? ''}</Words>
             {` · ${rowSize(row, units)} ${kindText(run.shape)}`}
           </Text>
