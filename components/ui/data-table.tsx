@@ -114,6 +114,7 @@ function BodyRow<Row>({ row, columns, href, chosen = false }: BodyRowProps<Row>)
     <Element
       tag="tr"
       aria-current={chosen || undefined}
+      data-href={href === undefined ? undefined : ''}
       onClick={open}
       style={[href !== undefined && styles.pressable, chosen && { backgroundColor: theme.sheet }]}
     >

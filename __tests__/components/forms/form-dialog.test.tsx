@@ -31,6 +31,12 @@ it('asks first when something was', () => {
   fireEvent.change(screen.getByLabelText('Name'), { target: { value: 'Level 4' } });
   escape();
   expect(close).not.toHaveBeenCalled();
+  // Escape answers the question, not the form behind it
+  fireEvent.keyDown(screen.getByRole('alertdialog'), { key: 'Escape' });
+  expect(screen.queryByRole('alertdialog')).toBeNull();
+  expect(close).not.toHaveBeenCalled();
+  expect(screen.getByLabelText<HTMLInputElement>('Name').value).toBe('Level 4');
+  escape();
   fireEvent.click(screen.getByRole('button', { name: 'Leave without saving' }));
   expect(close).toHaveBeenCalledTimes(1);
 });
