@@ -62,6 +62,8 @@ export function FormQuantityField<Input extends FieldValues, Output>(props: Form
       value={live ? live.text : editText(kind, quantity, units)}
       hint={hintOf({ hint: own.hint, kind, quantity, units })}
       onChange={type}
+      // Enter saves without leaving the field: what is wrong with it must be seen
+      onKeyDown={({ key }) => (key === 'Enter' ? setTyping(false) : undefined)}
       onBlur={settle}
       problem={typing ? undefined : (live?.problem ?? problem)}
     />

@@ -56,5 +56,5 @@ function fluidText({ from, to, printed }: Band, units: Units): string {
   if (from === null && to === null) return printed;
   if (from === null) return `below ${degreesText(Math.round(to!), units)}`;
   if (to === null) return `above ${degreesText(Math.round(from), units)}`;
-  return `${degreesText(Math.round(from), units)} to ${degreesText(Math.round(to), units)}`;
+  return `${Math.round(from)} to ${degreesText(Math.round(to), units)}`;
 }

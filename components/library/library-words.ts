@@ -57,18 +57,13 @@ export function matches(search: string, ...texts: readonly string[]): boolean {
     .every((word) => text.includes(word));
 }
 
-const sureness: readonly [RegExp, string][] = [
-  [/\bmedium-high\b/g, 'fairly sure'],
-  [/\blow-medium\b/g, 'weak'],
-  [/\bhigh\b/g, 'sure'],
-  [/\bmedium\b/g, 'to be checked'],
-  [/\blow\b/g, 'weak'],
+const plain: readonly [RegExp, string][] = [
+  [/\bmedium-high\b/g, 'medium to high'],
+  [/\blow-medium\b/g, 'low to medium'],
   [/\bgap\b/g, 'nothing found'],
   [/\bOD\b/g, 'outside diameter'],
 ];
 
-/** How sure a row is, in plain words: "Sure (outside diameter), fairly sure (walls)". */
-export function confidenceText(confidence: string): string {
-  const text = sureness.reduce((words, [pattern, plain]) => words.replace(pattern, plain), confidence);
-  return text.charAt(0).toUpperCase() + text.slice(1);
-}
+/** How sure a row is, in plain words: "high (outside diameter), medium to high (walls)". */
+export const confidenceText = (confidence: string): string =>
+  plain.reduce((words, [pattern, text]) => words.replace(pattern, text), confidence);

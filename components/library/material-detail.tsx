@@ -1,7 +1,10 @@
+import { StyleSheet, View } from 'react-native';
+
 import type { LibraryCurve, LibraryMaterial, LibrarySeries } from '@/api/contracts/library';
 import { inUnits, show, unitLabel } from '@/api/contracts/quantities';
 import { thicknessText } from '@/api/contracts/words-text';
 import { DrawnCurves } from '@/components/drawing/drawn';
+import { space } from '@/components/theme/tokens';
 import { DataTable, type Column } from '@/components/ui/data-table';
 import { Disclosure } from '@/components/ui/disclosure';
 import { FactList } from '@/components/ui/fact-list';
@@ -96,7 +99,9 @@ function CurveLine({ curve, isUsed }: { curve: LibraryCurve; isUsed: boolean }) 
         </Text>
       }
     >
-      <PointTable curve={curve} />
+      <View style={styles.points}>
+        <PointTable curve={curve} />
+      </View>
       <SourceLine source={curve.source} confidence={curve.confidence} />
     </Disclosure>
   );
@@ -126,3 +131,5 @@ function PointTable({ curve }: { curve: LibraryCurve }) {
     <DataTable label={curveWords[curve.kind]} columns={columns} rows={curve.points} keyOf={([mean]) => String(mean)} />
   );
 }
+
+const styles = StyleSheet.create({ points: { maxWidth: 420, paddingBottom: space.xs } });

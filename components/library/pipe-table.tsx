@@ -38,7 +38,7 @@ function columnsFor(sizes: readonly LibraryPipeSize[], units: Units, unit: strin
       label: 'Outside',
       unit,
       numeric: true,
-      cell: ({ outsideDiameter }) => length(outsideDiameter),
+      cell: ({ outsideDiameter }) => show('dimension', outsideDiameter, { units, digits: units === 'SI' ? 1 : 3 }),
     },
     ...walls.map((name): Column<LibraryPipeSize> => ({
       key: name,

@@ -10,7 +10,7 @@ export function SourceLine({ source, confidence, of }: SourceLineProps) {
   return (
     <Text size="small" tone="inkSoft">
       {`${about}${source}.`}
-      {confidence ? ` How sure: ${confidenceText(confidence)}.` : ''}
+      {confidence ? ` Confidence: ${confidenceText(confidence)}.` : ''}
     </Text>
   );
 }

@@ -29,7 +29,7 @@ describe('a band of sizes', () => {
     [null, null, 'SI', 'All pipe sizes'],
     // no NPS is listed for it: its DN stands
     [33, 33, 'IP', 'DN 33'],
-  ] as const)('%s to %s in %s reads %s', (from, to, units, text) => {
+  ] as const)('%s to %s in %s reads %s', (...[from, to, units, text]) => {
     expect(bandText(band(from, to), { units, sizes })).toBe(text);
   });
 });

@@ -26,10 +26,10 @@ describe('a curve', () => {
 });
 
 it('says in plain words how sure a row is', () => {
-  expect(confidenceText('high')).toBe('Sure');
-  expect(confidenceText('high (OD), medium-high (walls)')).toBe('Sure (outside diameter), fairly sure (walls)');
+  expect(confidenceText('high')).toBe('high');
+  expect(confidenceText('high (OD), medium-high (walls)')).toBe('high (outside diameter), medium to high (walls)');
   expect(confidenceText('gap (made OD); low-medium (range)')).toBe(
-    'Nothing found (made outside diameter); weak (range)',
+    'nothing found (made outside diameter); low to medium (range)',
   );
 });
 

@@ -11,6 +11,7 @@ export default function FinishesScreen() {
       rows={data}
       problem={problem}
       onRetry={reload}
+      narrow
       noun="a finish"
       wordsOf={({ name, kind }) => [name, kind]}
     >

@@ -7,7 +7,7 @@ export default function LibraryScreen() {
   return (
     <Screen
       title="Library"
-      lead="What every calculation stands on, each row with its source and how sure it is."
+      lead="What every calculation stands on, each row with its source and how far it can be trusted."
       narrow
     >
       <ListRows label="Library" items={items} flush />

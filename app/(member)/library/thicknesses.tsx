@@ -11,6 +11,7 @@ export default function ThicknessesScreen() {
       rows={data}
       problem={problem}
       onRetry={reload}
+      narrow
       noun="a series"
       wordsOf={({ title, form, note }) => [title, form, note]}
     >

@@ -10,7 +10,7 @@ export default function TouchScreen() {
   if (problem && !data) return <ProblemScreen problem={problem} onRetry={reload} back={back} />;
   if (!data) return <LoadingScreen title="Touch temperatures" back={back} shape="table" />;
   return (
-    <Screen title="Touch temperatures" back={back}>
+    <Screen title="Touch temperatures" back={back} narrow>
       <TouchDetail safety={data} />
     </Screen>
   );

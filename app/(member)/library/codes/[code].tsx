@@ -1,16 +1,17 @@
 import { useLocalSearchParams } from 'expo-router';
 
 import { RowScreen } from '@/components/job/row-screen';
+import { codeSlug } from '@/components/library/code-address';
 import { CodeDetail } from '@/components/library/code-detail';
 import { useCodes } from '@/hooks/use-library';
 
 export default function CodeScreen() {
-  const { code: id } = useLocalSearchParams<'/library/codes/[code]'>();
+  const { code: slug } = useLocalSearchParams<'/library/codes/[code]'>();
   const { data, problem, reload } = useCodes();
   return (
     <RowScreen
       noun="code edition"
-      id={id}
+      id={data?.find((one) => codeSlug(one.id) === slug)?.id ?? slug}
       rows={data}
       problem={problem}
       onRetry={reload}

@@ -1,3 +1,4 @@
+import { codeHref } from '@/components/library/code-address';
 import { LibraryScreen } from '@/components/library/library-screen';
 import { ListRows } from '@/components/ui/list-row';
 import { useCodes } from '@/hooks/use-library';
@@ -11,6 +12,7 @@ export default function CodesScreen() {
       rows={data}
       problem={problem}
       onRetry={reload}
+      narrow
       noun="an edition"
       wordsOf={({ title, pipes, ducts }) => [title, pipes.name, ducts?.name ?? '']}
     >
@@ -22,7 +24,7 @@ export default function CodesScreen() {
             key: id,
             title,
             text: [pipes.name, ducts?.name].filter(Boolean).join('; ducts: '),
-            href: `/library/codes/${id}` as const,
+            href: codeHref(id),
           }))}
         />
       )}

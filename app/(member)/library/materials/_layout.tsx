@@ -15,7 +15,7 @@ export default function MaterialsLayout() {
     <ListPane
       title="Materials"
       href="/library/materials"
-      items={materialItems(data, units)}
+      items={materialItems(data, units).map((item) => ({ ...item, text: undefined }))}
       chosen={material ? `std/${material}` : undefined}
     />
   );
