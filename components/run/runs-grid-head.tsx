@@ -5,6 +5,7 @@ import { fontFamily, hairline, space, touchTarget, type, weight } from '@/compon
 import { useTheme } from '@/components/theme/use-theme';
 import { webStyle } from '@/components/theme/web-style';
 import { Element } from '@/components/ui/element';
+import { Hidden } from '@/components/ui/hidden';
 
 import { columnHead, type ColumnField } from './run-fields';
 
@@ -25,7 +26,9 @@ export function RunsGridHead({ fields, units, sort }: RunsGridHeadProps) {
   return (
     <thead>
       <tr>
-        <Element tag="th" scope="col" aria-label="Section" style={[styles.cell, styles.glyph, colours]} />
+        <Element tag="th" scope="col" style={[styles.cell, styles.glyph, colours]}>
+          <Hidden>Section</Hidden>
+        </Element>
         {fields.map((field) => (
           <HeadCell key={field.key} field={field} units={units} sort={sort} />
         ))}

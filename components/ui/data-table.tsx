@@ -8,6 +8,7 @@ import { useTheme } from '@/components/theme/use-theme';
 import { webStyle } from '@/components/theme/web-style';
 
 import { Element } from './element';
+import { Hidden } from './hidden';
 import { Link } from './link';
 import { Text } from './text';
 
@@ -91,10 +92,9 @@ function HeadCell<Row>({ column }: { column: Column<Row> }) {
     <Element
       tag="th"
       scope="col"
-      aria-label={hideLabel ? label : undefined}
       style={[styles.cell, styles.head, colours, numeric && styles.numeric, width ? { width } : null]}
     >
-      {hideLabel ? null : label}
+      {hideLabel ? <Hidden>{label}</Hidden> : label}
       {unit ? <Element tag="span" style={styles.unit}>{` ${unit}`}</Element> : null}
     </Element>
   );

@@ -19,16 +19,18 @@ export type ScreenProps = HeadProps & {
   narrow?: boolean;
   /** the content fills the screen and scrolls by itself */
   fixed?: boolean;
+  /** nothing on it takes the focus, so it does: the keyboard scrolls it */
+  forReading?: boolean;
   children: ReactNode;
 };
 
-export function Screen({ children, fixed, narrow, footer, action, ...head }: ScreenProps) {
+export function Screen({ children, fixed, narrow, forReading, footer, action, ...head }: ScreenProps) {
   const { isPhone } = useLayout();
   useTitle(head.tabTitle ?? head.title);
   const atFoot = isPhone && !footer && action;
   return (
     <View style={styles.screen}>
-      <View style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
+      <View tabIndex={forReading ? 0 : undefined} style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
         <View style={[isPhone ? styles.phone : styles.wide, fixed && styles.fill, narrow && styles.narrow]}>
           <ScreenHead {...head} action={atFoot ? undefined : action} />
           {children}

@@ -30,7 +30,7 @@ export default function ScheduleScreen() {
       </Screen>
     );
   return (
-    <Screen title="Schedule" lead="Thickness by service, size and place, each with what decides it.">
+    <Screen title="Schedule" forReading lead="Thickness by service, size and place, each with what decides it.">
       <ScheduleList rows={schedule.rows} units={units} />
       <Heading>Quantities, net</Heading>
       {takeoff ? <TakeoffTables takeoff={takeoff} units={units} /> : null}
