@@ -24,13 +24,16 @@ export type ScreenProps = HeadProps & {
   children: ReactNode;
 };
 
+const focusable = { tabIndex: 0 } as const;
+
 export function Screen({ children, fixed, narrow, forReading, footer, action, ...head }: ScreenProps) {
   const { isPhone } = useLayout();
   useTitle(head.tabTitle ?? head.title);
   const atFoot = isPhone && !footer && action;
+  const place = forReading ? focusable : {};
   return (
     <View style={styles.screen}>
-      <View tabIndex={forReading ? 0 : undefined} style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
+      <View {...place} style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
         <View style={[isPhone ? styles.phone : styles.wide, fixed && styles.fill, narrow && styles.narrow]}>
           <ScreenHead {...head} action={atFoot ? undefined : action} />
           {children}
