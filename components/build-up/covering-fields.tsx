@@ -9,6 +9,7 @@ import { Grid, Stack } from '@/components/ui/stack';
 
 import { BandFields } from './band-fields';
 import type { CoveringDraft } from './covering-draft';
+import { CoveringPreview } from './covering-preview';
 import { bodyWords, retarderWords, type CoveringNames } from './covering-words';
 import { LayerFields } from './layer-fields';
 import type { LayerLibrary } from './layer-options';
@@ -64,6 +65,7 @@ export function CoveringFields({ names, library, finishes, services, isOutermost
         />
         <Retarder services={services} />
       </Grid>
+      <CoveringPreview names={names} />
       <FormTextField control={control} name="note" label="Note" optional hint="Printed with the schedule" />
     </>
   );

@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import type { FieldValues } from 'react-hook-form';
 
 import { Button } from '@/components/ui/button';
-import { DataTable, type Column } from '@/components/ui/data-table';
+import { FactList } from '@/components/ui/fact-list';
 import { Notice } from '@/components/ui/notice';
 import { Row } from '@/components/ui/stack';
 import { Text } from '@/components/ui/text';
@@ -37,27 +37,25 @@ export function RowForm<Input extends FieldValues, Output extends Input>(props: 
 }
 
 type Difference = { term: string; theirs: string; mine: string };
-const columns: readonly Column<Difference>[] = [
-  { key: 'term', label: 'What', cell: ({ term }) => term },
-  { key: 'theirs', label: 'Stored now', cell: ({ theirs }) => theirs || 'empty' },
-  { key: 'mine', label: 'Yours', cell: ({ mine }) => <Text weight="strong">{mine || 'empty'}</Text> },
-];
-
 type ConflictNoticeProps = { theirs: Said[]; mine: Said[]; onTakeTheirs: () => void };
 
 /** Nothing is lost on either side: what only they changed is in the form already. */
 function ConflictNotice({ theirs, mine, onTakeTheirs }: ConflictNoticeProps) {
   const rows = differences(theirs, mine);
   return (
-    <Notice title="Someone else changed this while you did">
+    <Notice>
       <Text>
         {rows.length > 0
-          ? 'What only they changed is taken over below. This is where you differ; saving again puts yours in place of theirs.'
+          ? 'What only they changed is taken over below. Here you differ; saving again puts yours in place of theirs.'
           : 'What they changed is taken over below, and you differ nowhere else. Save again to keep it so.'}
       </Text>
-      {rows.length > 0 ? (
-        <DataTable label="Where you differ" columns={columns} rows={rows} keyOf={({ term }) => term} />
-      ) : null}
+      <FactList
+        facts={rows.map((row) => ({
+          term: row.term,
+          value: `Yours: ${row.mine || 'empty'}`,
+          note: `Stored now: ${row.theirs || 'empty'}`,
+        }))}
+      />
       <Row>
         <Button label="Take theirs instead" onPress={onTakeTheirs} />
       </Row>

@@ -1,5 +1,9 @@
+import { StyleSheet, View } from 'react-native';
+
+import { hairline, space } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/use-theme';
 import { Disclosure } from '@/components/ui/disclosure';
-import { LinkButton, Link } from '@/components/ui/link';
+import { Link } from '@/components/ui/link';
 import { ListRows } from '@/components/ui/list-row';
 import { Mark } from '@/components/ui/mark';
 import { Row, Stack } from '@/components/ui/stack';
@@ -41,17 +45,26 @@ function Summary({ title, count, gap }: { title: string; count: number; gap: str
 }
 
 function EmptySection({ section: { title, add, empty }, mayEdit }: JobSectionProps) {
+  const theme = useTheme();
   return (
-    <Stack gap="xs">
-      <Text size="lead" weight="strong">
-        {title}
-      </Text>
-      <Text tone="inkSoft">{empty}</Text>
-      {mayEdit ? (
-        <Row>
-          <LinkButton href={add.href} label={add.label} />
-        </Row>
-      ) : null}
-    </Stack>
+    <View style={[styles.empty, { borderBottomColor: theme.rule }]}>
+      <Stack gap="xxs" grow>
+        <Text size="lead" weight="strong">
+          {title}
+        </Text>
+        <Text tone="inkSoft">{empty}</Text>
+      </Stack>
+      {mayEdit ? <Link href={add.href} label={add.label} /> : null}
+    </View>
   );
 }
+
+const styles = StyleSheet.create({
+  empty: {
+    flexDirection: 'row',
+    alignItems: 'center',
+    gap: space.md,
+    paddingVertical: space.sm,
+    borderBottomWidth: hairline,
+  },
+});

@@ -4,6 +4,7 @@ import type { Addendum, Drawing, Level } from '@/api/contracts/basis';
 import type { BuildUp, SpecificationRow } from '@/api/contracts/build-up';
 import type { Place } from '@/api/contracts/place';
 import type { Service } from '@/api/contracts/service';
+import { inOrderOfServices } from '@/components/build-up/build-up-table';
 import { CoveringGlyph } from '@/components/build-up/covering-glyph';
 import {
   bandText,
@@ -15,6 +16,7 @@ import {
   thicknessesText,
   type CoveringNames,
 } from '@/components/build-up/covering-words';
+import { byLabel } from '@/components/specification/row-labels';
 import { airText, degreesText, reachWords, situationText } from '@/components/place/place-words';
 import { limitsText, operatingText } from '@/components/service/service-words';
 import type { ListItem } from '@/components/ui/list-row';
@@ -85,7 +87,11 @@ export function buildUpsSection(jobId: string, rows: readonly BuildUp[], names: 
     add: { label: 'Add a build-up', href: one('new') },
     empty: 'Say with what a service is insulated; the study then proposes the thickness where none is specified.',
     gap: null,
-    items: rows.map((row) => ({ key: row.id, ...coveringItem(row, names), href: one(row.id) })),
+    items: inOrderOfServices(rows, names).map((row) => ({
+      key: row.id,
+      ...coveringItem(row, names),
+      href: one(row.id),
+    })),
   };
 }
 
@@ -103,7 +109,7 @@ export function specificationSection(jobId: string, rows: SpecificationRows, nam
     add: { label: 'Add a row', href: one('new') },
     empty: 'Enter the table as the engineer handed it down: material and thickness by service, size and place.',
     gap: uncoveredServices(rows.services, [...rows.specification, ...rows.buildUps]),
-    items: rows.specification.map((row) => {
+    items: [...rows.specification].sort(byLabel).map((row) => {
       const item = coveringItem(row, names);
       return {
         key: row.id,

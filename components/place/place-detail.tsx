@@ -38,7 +38,8 @@ export function PlaceDetail({ jobId, place, copyOf }: PlaceDetailProps) {
   );
 }
 
-const isSaid = ({ value }: { value: string }) => value !== '';
+// the title says the name
+const isSaid = ({ term, value }: { term: string; value: string }) => value !== '' && term !== 'Name';
 
 type PlaceActionsProps = { jobId: string; place: Place; onDeleted: () => void };
 

@@ -41,7 +41,8 @@ export function ServiceDetail({ jobId, service, copyOf }: ServiceDetailProps) {
   );
 }
 
-const isSaid = ({ value }: { value: string }) => value !== '';
+// the title says the name
+const isSaid = ({ term, value }: { term: string; value: string }) => value !== '' && term !== 'Name';
 
 type ServiceActionsProps = { jobId: string; service: Service; onDeleted: () => void };
 

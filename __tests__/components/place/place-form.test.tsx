@@ -180,16 +180,16 @@ describe('a place that someone else changed meanwhile', () => {
     });
     type('Name', 'Plant room 2');
     await save();
-    await screen.findByText('Someone else changed this while you did');
+    await screen.findByText('Somebody else changed this first');
     // both changed the name: theirs and mine stand side by side; only they changed the note: it is in the form
-    expect(screen.getByText('Boiler room')).toBeTruthy();
-    expect(screen.getByText('Plant room 2')).toBeTruthy();
+    expect(screen.getByText('Stored now: Boiler room')).toBeTruthy();
+    expect(screen.getByText('Yours: Plant room 2')).toBeTruthy();
     expect(field('Name').value).toBe('Plant room 2');
     expect(field(/^Note/).value).toBe('Very damp');
     await save();
     await waitFor(() => expect(saved).toHaveBeenCalled());
     expect(writes()[1]!.body).toMatchObject({ version: 4, name: 'Plant room 2', note: 'Very damp' });
-    expect(screen.queryByText('Someone else changed this while you did')).toBeNull();
+    expect(screen.queryByText('Take theirs instead')).toBeNull();
   });
 
   it('gives way to theirs when that is asked', async () => {
@@ -198,6 +198,6 @@ describe('a place that someone else changed meanwhile', () => {
     await save();
     fireEvent.click(await screen.findByText('Take theirs instead'));
     await waitFor(() => expect(field('Name').value).toBe('Boiler room'));
-    expect(screen.queryByText('Someone else changed this while you did')).toBeNull();
+    expect(screen.queryByText('Take theirs instead')).toBeNull();
   });
 });
