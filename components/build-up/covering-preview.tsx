@@ -7,7 +7,7 @@ import { Text } from '@/components/ui/text';
 
 import type { CoveringDraft } from './covering-draft';
 import { drawnCovering } from './covering-glyph';
-import { bandText, layerText, nameIn, type CoveringNames } from './covering-words';
+import { layerText, nameIn, type CoveringNames } from './covering-words';
 
 const draftSchema = buildUpInputSchema.pick({ layers: true, fromDn: true, toDn: true, appliesTo: true });
 
@@ -27,7 +27,7 @@ export function CoveringPreview({ names }: { names: CoveringNames }) {
       <DrawnSection drawn={drawn} size={120} />
       <Stack gap="xxs">
         <Text size="small" tone="inkSoft">
-          {draft.appliesTo === 'pipe' ? `Drawn on the smallest pipe: ${bandText(draft, names)}` : 'Drawn to scale'}
+          {draft.appliesTo === 'pipe' ? 'To scale, on the smallest of its pipes' : 'To scale'}
         </Text>
         {draft.layers.map((layer, index) => (
           <Text key={index}>{layerText(layer, names)}</Text>

@@ -36,7 +36,6 @@ export function Form<Input extends FieldValues, Output>(props: FormProps<Input, 
       <FormBody id={id} label={label} form={form} onSave={onSave}>
         {children}
         {isPhone && actions ? <View style={styles.actions}>{actions}</View> : null}
-        {isPhone && actions ? <View style={styles.actions}>{actions}</View> : null}
         <View style={[styles.actions, styles.pinned, { backgroundColor: theme.paper, borderTopColor: theme.rule }]}>
           <Button label={saveLabel} busyLabel="Saving" tone="action" submit busy={isSubmitting} full={isPhone} />
           {onCancel ? <Button label="Cancel" onPress={onCancel} /> : null}

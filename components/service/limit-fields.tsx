@@ -158,6 +158,6 @@ function PlacedLimit({ form, index, places, onKind, onRemove }: PlacedLimitProps
 }
 
 const styles = StyleSheet.create({
-  values: { paddingLeft: 36, paddingBottom: space.xs, maxWidth: 560 },
+  values: { paddingTop: space.xxs, paddingLeft: 36, paddingBottom: space.xs, maxWidth: 560 },
   start: { alignItems: 'flex-start', paddingTop: space.xs },
 });

@@ -52,5 +52,12 @@ const styles = StyleSheet.create({
     borderBottomStyle: 'solid',
   }),
   term: webStyle({ flexShrink: 0 }),
-  value: webStyle({ margin: 0, flex: 1, minWidth: 0, overflowWrap: 'anywhere' }),
+  value: webStyle({
+    display: 'flex',
+    flexDirection: 'column',
+    margin: 0,
+    flex: 1,
+    minWidth: 0,
+    overflowWrap: 'anywhere',
+  }),
 });

@@ -62,7 +62,7 @@ function ListRow({
         <View style={styles.words}>
           <Text weight="strong">{title}</Text>
           {text ? (
-            <Text size="small" tone="inkSoft">
+            <Text size="small" tone="inkSoft" lines={flush ? undefined : 2}>
               {text}
             </Text>
           ) : null}
