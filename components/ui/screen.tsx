@@ -24,16 +24,13 @@ export type ScreenProps = HeadProps & {
   children: ReactNode;
 };
 
-const focusable = { tabIndex: 0 } as const;
-
-export function Screen({ children, fixed, narrow, forReading, footer, action, ...head }: ScreenProps) {
+export function Screen({ children, fixed, narrow, footer, action, ...head }: ScreenProps) {
   const { isPhone } = useLayout();
   useTitle(head.tabTitle ?? head.title);
   const atFoot = isPhone && !footer && action;
-  const place = forReading ? focusable : {};
   return (
     <View style={styles.screen}>
-      <View {...place} style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
+      <View tabIndex={tabStopOf(head)} style={[styles.scroll, fixed ? styles.fixed : styles.scrolls]}>
         <View style={[isPhone ? styles.phone : styles.wide, fixed && styles.fill, narrow && styles.narrow]}>
           <ScreenHead {...head} action={atFoot ? undefined : action} />
           {children}
@@ -43,6 +40,8 @@ export function Screen({ children, fixed, narrow, forReading, footer, action, ..
     </View>
   );
 }
+
+const tabStopOf = ({ forReading }: Pick<ScreenProps, 'forReading'>) => (forReading ? 0 : undefined);
 
 function ScreenFoot({ children }: { children: ReactNode }) {
   const theme = useTheme();
