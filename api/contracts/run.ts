@@ -57,10 +57,18 @@ export const pipeFittings = [
 export const ductFittings = ['elbow', 'transition', 'take-off', 'access-door'] as const;
 export const fittingKinds = [...pipeFittings, ...ductFittings] as const;
 export type FittingKind = (typeof fittingKinds)[number];
-export const fittingsSchema = z.partialRecord(
-  z.enum(fittingKinds),
-  z.number().int('Must be a whole number').min(0).max(9999),
-);
+const counted = z
+  .number({ error: 'Must be a number' })
+  .int('Must be a whole number')
+  .min(0, 'Must be at least 0')
+  .max(9999, 'At most 9999');
+const isCounted = ([, number]: [string, number | null | undefined]) => typeof number === 'number';
+const kindOfFitting = z.enum(fittingKinds);
+/** How many of each kind; a form holds `null` or nothing where there are none, which is not stored. */
+export const fittingsSchema = z
+  .partialRecord(kindOfFitting, counted.nullish())
+  .transform((fittings) => Object.fromEntries(Object.entries(fittings).filter(isCounted)))
+  .pipe(z.partialRecord(kindOfFitting, counted));
 export type Fittings = z.infer<typeof fittingsSchema>;
 
 /** A departure from the specification row; kept and printed with its reason. */
