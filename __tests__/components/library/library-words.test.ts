@@ -1,13 +1,14 @@
+import type { LibraryCurve } from '@/api/contracts/library';
 import { conductivityAt, confidenceText, limitsOfUseText, matches } from '@/components/library/library-words';
 
 // Points of the mineral fibre curve: ASHRAE Handbook Fundamentals 2021 ch.23 Table 8.
-const curve = {
-  kind: 'max' as const,
+const curve: LibraryCurve = {
+  kind: 'max',
   points: [
     [24, 0.035],
     [93, 0.043],
     [204, 0.061],
-  ] as [number, number][],
+  ],
   source: 'Handbook',
   confidence: 'high',
 };
