@@ -4,10 +4,14 @@ import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 
 import { useUnsaved } from './unsaved';
 
+/** What was held back, to be done after all; settles when it is done. */
+type Leaving = () => Promise<unknown>;
+
 /** Asks before a link or the back button throws away what is not saved. */
 export function LeaveGuard({ isUnsaved }: { isUnsaved: boolean }) {
-  const [leave, setLeave] = useState<() => void>();
-  const asks = isUnsaved && leave === undefined;
+  const [leave, setLeave] = useState<Leaving>();
+  const [isGoing, setGoing] = useState(false);
+  const asks = isUnsaved && leave === undefined && !isGoing;
   useUnsaved(isUnsaved);
   useEffect(() => (asks ? holdLeaving((go) => setLeave(() => go)) : undefined), [asks]);
   if (!leave) return null;
@@ -15,8 +19,10 @@ export function LeaveGuard({ isUnsaved }: { isUnsaved: boolean }) {
     <DiscardDialog
       onKeep={() => setLeave(undefined)}
       onDiscard={() => {
-        leave();
+        // going back takes a moment, in which nothing may ask again
+        setGoing(true);
         setLeave(undefined);
+        void leave().finally(() => setGoing(false));
       }}
     />
   );
@@ -37,19 +43,19 @@ export function DiscardDialog({ onKeep, onDiscard }: { onKeep: () => void; onDis
 }
 
 /** Stops a link and the browser's back and forward; `ask` gets what would have happened. */
-function holdLeaving(ask: (go: () => void) => void): () => void {
+function holdLeaving(ask: (go: Leaving) => void): () => void {
   const stopClick = (event: MouseEvent) => {
     const link = event.target instanceof Element ? event.target.closest<HTMLAnchorElement>('a[href]') : null;
     if (!link || !opensHere(link, event)) return;
     event.preventDefault();
     event.stopPropagation();
-    ask(() => link.click());
+    ask(async () => link.click());
   };
   const stopBack = (event: NavigateEvent) => {
     if (event.navigationType !== 'traverse' || !event.cancelable) return;
     event.preventDefault();
     const { key } = event.destination;
-    ask(() => window.navigation.traverseTo(key));
+    ask(() => window.navigation.traverseTo(key).finished.catch(() => undefined));
   };
   // before React sees the click; not every browser has `navigation`, nor does a test's
   const history = 'navigation' in window ? window.navigation : undefined;
