@@ -2,7 +2,7 @@ import useSWR, { useSWRConfig } from 'swr';
 import { z } from 'zod';
 
 import { runSchema, runsPatchedSchema, type Run, type RunInput, type RunsPatch } from '@/api/contracts/run';
-import { request, type RequestFailed } from '@/hooks/request';
+import { request, RequestFailed } from '@/hooks/request';
 
 const runsSchema = z.object({ runs: runSchema.array() });
 type Runs = z.infer<typeof runsSchema>;
@@ -27,11 +27,17 @@ export function usePatchRuns(jobId: string) {
 
 type Seen = Pick<Run, 'id' | 'version'>;
 
+/** A batch answers with all the runs that were changed meanwhile; who writes one run hears of that one. */
+function ofOne(error: unknown): never {
+  if (!(error instanceof RequestFailed) || !Array.isArray(error.problem.current)) throw error;
+  throw new RequestFailed({ ...error.problem, current: error.problem.current[0] });
+}
+
 /** One run at a time; the id of a new one is made here, so that a retry of the same save writes it once. */
 export function useRunActions(jobId: string) {
   const patch = usePatchRuns(jobId);
   const only = async (sent: Promise<Run[]>): Promise<Run> => {
-    const [run] = await sent;
+    const [run] = await sent.catch(ofOne);
     if (!run) throw new Error('The server answered without the run');
     return run;
   };

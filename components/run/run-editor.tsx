@@ -5,8 +5,10 @@ import { useLayout } from '@/components/theme/use-layout';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 import { LinkButton } from '@/components/ui/link';
+import { Notice } from '@/components/ui/notice';
 import { useToast } from '@/components/ui/toast';
 import { useRunActions } from '@/hooks/use-runs';
+import { useMay } from '@/hooks/use-session';
 
 import { newRun, nextNumber } from './run-defaults';
 import { RunForm } from './run-form';
@@ -22,8 +24,15 @@ type RunEditorProps = {
   onSaved: (run: Run) => void;
 };
 
-/** The form of one run with what else can be done with it: its study, another like it, removing it. */
-export function RunEditor({ jobId, row, rows, lookups, onClose, onSaved }: RunEditorProps) {
+/** The form of one run, for who may change it. */
+export function RunEditor(props: RunEditorProps) {
+  const mayEdit = useMay('edit-jobs');
+  if (!mayEdit) return <Notice title="For reading only">An estimator of your firm changes runs.</Notice>;
+  return <Editor {...props} />;
+}
+
+/** With what else can be done with it: its study, another like it, removing it. */
+function Editor({ jobId, row, rows, lookups, onClose, onSaved }: RunEditorProps) {
   const toast = useToast();
   const [copied, setCopied] = useState<Run>();
   const number = nextNumber(rows.map((one) => one.run.number));
