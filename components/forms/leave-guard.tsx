@@ -4,8 +4,8 @@ import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 
 import { useUnsaved } from './unsaved';
 
-/** What was held back, to be done after all; settles when it is done. */
-type Leaving = () => Promise<unknown>;
+/** What was held back, to be done after all: at once, or with a promise that settles when it is done. */
+type Leaving = () => Promise<unknown> | undefined;
 
 /** Asks before a link or the back button throws away what is not saved. */
 export function LeaveGuard({ isUnsaved }: { isUnsaved: boolean }) {
@@ -19,10 +19,11 @@ export function LeaveGuard({ isUnsaved }: { isUnsaved: boolean }) {
     <DiscardDialog
       onKeep={() => setLeave(undefined)}
       onDiscard={() => {
-        // going back takes a moment, in which nothing may ask again
-        setGoing(true);
+        const gone = leave();
         setLeave(undefined);
-        void leave().finally(() => setGoing(false));
+        // going back takes a moment, in which nothing may ask again
+        setGoing(gone !== undefined);
+        void gone?.finally(() => setGoing(false));
       }}
     />
   );
@@ -49,13 +50,16 @@ function holdLeaving(ask: (go: Leaving) => void): () => void {
     if (!link || !opensHere(link, event)) return;
     event.preventDefault();
     event.stopPropagation();
-    ask(async () => link.click());
+    ask(() => {
+      link.click();
+      return undefined;
+    });
   };
   const stopBack = (event: NavigateEvent) => {
     if (event.navigationType !== 'traverse' || !event.cancelable) return;
     event.preventDefault();
     const { key } = event.destination;
-    ask(() => window.navigation.traverseTo(key).finished.catch(() => undefined));
+    ask(() => window.navigation.traverseTo(key).finished?.catch(() => undefined));
   };
   // before React sees the click; not every browser has `navigation`, nor does a test's
   const history = 'navigation' in window ? window.navigation : undefined;
