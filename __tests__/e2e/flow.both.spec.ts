@@ -10,7 +10,7 @@ import { addressMail, freeze, linkInMail, revisionIn } from './support/documents
 import { demoJob } from './support/jobs';
 import { missingIn, readDownload } from './support/numbers';
 import { expectScreen } from './support/open';
-import { password, people } from './support/people';
+import { nobody, password, people } from './support/people';
 import { desk, phone } from './support/sizes';
 import { expect, test } from './support/test';
 
@@ -78,7 +78,7 @@ for (const [name, use] of Object.entries({ phone, desk })) {
         const inbox = await openAs(null);
         const { link, attachment } = await linkInMail(inbox, subject);
 
-        const client = await browser.newContext({ ...phone, storageState: { cookies: [], origins: [] } });
+        const client = await browser.newContext({ ...phone, storageState: nobody });
         watch.listen(client);
         const clientPage = await client.newPage();
         await clientPage.goto(link);

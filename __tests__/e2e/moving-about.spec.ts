@@ -8,7 +8,8 @@ test('the back button goes back through what was opened', async ({ page }) => {
   await page.getByRole('link', { name: /R19/ }).click();
   await expectScreen(page, 'DN 150 steel, Plant room');
   await expect(page).toHaveURL(`${path}/runs/${run('R19').id}`);
-  await page.getByRole('link', { name: 'R20' }).click();
+  const neighbours = page.getByRole('navigation', { name: 'Runs before and after' });
+  await neighbours.getByRole('link', { name: /R20/ }).click();
   await expectScreen(page, 'DN 80 steel, Plant room');
   await page.goBack();
   await expectScreen(page, 'DN 150 steel, Plant room');

@@ -1,5 +1,5 @@
 import { demoJob } from './support/jobs';
-import { open } from './support/open';
+import { expectScreen, open } from './support/open';
 import { expect, test } from './support/test';
 
 test.describe('a foreman', () => {
@@ -22,9 +22,10 @@ test.describe('a foreman', () => {
   test('opens a run from the list as its study, not as a form', async ({ page }, { project }) => {
     const { path } = await demoJob(page.request);
     await open(page, `${path}/runs`, 'Runs');
-    if (project.name === 'phone') await page.getByRole('link', { name: /R30/ }).click();
-    else await page.getByRole('row', { name: /R30/ }).click();
-    await expect(page.getByRole('heading', { level: 1, name: 'DN 100 steel, Service tunnel' })).toBeVisible();
+    // both show it without scrolling: the grid draws only what is in sight
+    if (project.name === 'phone') await page.getByRole('link', { name: /R01/ }).click();
+    else await page.getByRole('row', { name: /R01/ }).click();
+    await expectScreen(page, '2 in copper tube, Concealed ceiling void');
   });
 
   test('cannot freeze or send, not by an address typed by hand either', async ({ page, watch }) => {

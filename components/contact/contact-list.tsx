@@ -24,8 +24,8 @@ const columns: readonly Column<Contact>[] = [
 ];
 
 export function ContactList({ contacts }: { contacts: readonly Contact[] }) {
-  const { isPhone } = useLayout();
-  if (isPhone) return <ListRows label="Contacts" items={contactItems(contacts)} flush />;
+  const { isSplit } = useLayout();
+  if (!isSplit) return <ListRows label="Contacts" items={contactItems(contacts)} flush />;
   return (
     <DataTable
       label="Contacts"

@@ -23,7 +23,7 @@ type SectionScreenProps = {
   children: ReactNode;
 };
 
-/** All of one kind in a job: a table where there is room, a list on a phone, a first step where there is none. */
+/** All of one kind in a job: a table where there is room, else a list, a first step where there is none. */
 export function SectionScreen({ jobId, title, tools, children }: SectionScreenProps) {
   const { job } = useJob(jobId);
   const { sections, problem } = useJobSections(jobId);
@@ -44,7 +44,7 @@ type SectionBodyProps = Pick<SectionScreenProps, 'tools' | 'children'> & {
 };
 
 function SectionBody({ section, back, tools, children }: SectionBodyProps) {
-  const { isPhone } = useLayout();
+  const { isSplit } = useLayout();
   const mayEdit = useMay('edit-jobs');
   const { title, items, gap, add, empty } = section;
   const action = mayEdit ? add : undefined;
@@ -60,7 +60,7 @@ function SectionBody({ section, back, tools, children }: SectionBodyProps) {
     <Screen title={title} back={back} action={action}>
       {gap ? <Mark verdict="caution" words={gap} size="body" /> : null}
       {tools}
-      {isPhone ? <ListRows label={title} items={items} flush /> : children}
+      {isSplit ? children : <ListRows label={title} items={items} flush />}
     </Screen>
   );
 }

@@ -1,6 +1,6 @@
 import type { LibraryCode } from '@/api/contracts/library';
+import { showWithUnit } from '@/api/contracts/quantities';
 import { thicknessText } from '@/api/contracts/words-text';
-import { degreesText } from '@/components/place/place-words';
 import { DataTable, type Column } from '@/components/ui/data-table';
 import { Text } from '@/components/ui/text';
 import { useUnits } from '@/hooks/use-units';
@@ -46,7 +46,7 @@ const columnsFor = (pipes: Pipes, units: Units): readonly Column<Band>[] => [
     key: 'mean',
     label: 'at a mean of',
     numeric: true,
-    cell: ({ ratingMean }) => degreesText(Math.round(ratingMean), units),
+    cell: ({ ratingMean }) => whole(ratingMean, units),
   },
 ];
 
@@ -54,7 +54,9 @@ const columnsFor = (pipes: Pipes, units: Units): readonly Column<Band>[] => [
 function fluidText({ from, to, printed }: Band, units: Units): string {
   if (units === 'IP') return `${printed} °F`;
   if (from === null && to === null) return printed;
-  if (from === null) return `below ${degreesText(Math.round(to!), units)}`;
-  if (to === null) return `above ${degreesText(Math.round(from), units)}`;
-  return `${Math.round(from)} to ${degreesText(Math.round(to), units)}`;
+  if (from === null) return `below ${whole(to!, units)}`;
+  if (to === null) return `above ${whole(from, units)}`;
+  return `${Math.round(from)} to ${whole(to, units)}`;
 }
+
+const whole = (celsius: number, units: Units): string => showWithUnit('temperature', celsius, { units, digits: 0 });

@@ -29,8 +29,8 @@ export const materialItems = (materials: readonly LibraryMaterial[], units: Unit
 
 export function MaterialList({ materials }: { materials: readonly LibraryMaterial[] }) {
   const { units } = useUnits();
-  const { isPhone } = useLayout();
-  if (isPhone) return <ListRows label="Materials" items={materialItems(materials, units)} flush />;
+  const { isSplit } = useLayout();
+  if (!isSplit) return <ListRows label="Materials" items={materialItems(materials, units)} flush />;
   return (
     <DataTable
       label="Materials"

@@ -18,9 +18,12 @@ export const password = process.env.DEMO_PASSWORD ?? 'plant-room-demo';
 
 export type SignedIn = Exclude<BrowserContextOptions['storageState'], string | undefined>;
 
+/** What a browser keeps in which nobody has signed in. */
+export const nobody: SignedIn = { cookies: [], origins: [] };
+
 /** Signs a person in as people do, on the page, and gives what the browser keeps of it. */
 export async function signIn(browser: Browser, person: Person, baseURL?: string): Promise<SignedIn> {
-  const context = await browser.newContext({ baseURL });
+  const context = await browser.newContext({ baseURL, storageState: nobody });
   const page = await context.newPage();
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(people[person]);

@@ -1,6 +1,6 @@
 import { test as base, type Browser, type BrowserContext, type Page } from '@playwright/test';
 
-import { signIn, type Person, type SignedIn } from './people';
+import { nobody, signIn, type Person, type SignedIn } from './people';
 import { createWatch, type Watch } from './watch';
 
 type Fixtures = {
@@ -12,8 +12,6 @@ type Fixtures = {
   openAs: (person: Person | null) => Promise<Page>;
 };
 type WorkerFixtures = { sessionOf: (person: Person) => Promise<SignedIn> };
-
-const nobody: SignedIn = { cookies: [], origins: [] };
 
 /** Every test begins signed in as the estimator who may send, and fails when a console had an error in it. */
 export const test = base.extend<Fixtures, WorkerFixtures>({
