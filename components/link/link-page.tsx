@@ -35,7 +35,7 @@ export function LinkPage({ token, link }: LinkPageProps) {
         </View>
       </Main>
       {sent && link.pdfBytes ? (
-        <View style={[styles.foot, { backgroundColor: theme.sheet, borderTopColor: theme.rule }]}>
+        <View role="contentinfo" style={[styles.foot, { backgroundColor: theme.sheet, borderTopColor: theme.rule }]}>
           <Text tone="inkSoft">{`${sent.letterhead.name} · ${sent.preparedBy.email}`}</Text>
           <PdfLink path={`/links/${token}/pdf`} label={`PDF, ${sizeText(link.pdfBytes)}`} tone="action" download />
         </View>
