@@ -14,7 +14,7 @@ export function uncoveredServices(
   const names = services.filter(({ id }) => !covered.has(id)).map(({ name }) => name);
   if (names.length === 0) return null;
   const has = names.length === 1 ? 'has' : 'have';
-  return `${listText(names)} ${has} neither a specification row nor a build-up: runs of it cannot be judged.`;
+  return `${listText(names)} ${has} neither a specification row nor a build-up: runs of ${names.length === 1 ? 'it' : 'them'} cannot be judged.`;
 }
 
 /** Services whose thickness nobody hands down and nobody may propose. */
