@@ -21,7 +21,7 @@ const runners = {
   lint: { needs: [], run: () => counted([module('eslint/bin/eslint.js'), '.', '--max-warnings', '0', ...cached]) },
   types: { needs: [], run: () => counted(['scripts/types.mjs']) },
   unit: { needs: ['postgresql', 'poppler-utils'], run: unit },
-  browser: { needs: ['postgresql', 'chromium'], run: browser },
+  browser: { needs: ['postgresql', 'chromium', 'poppler-utils'], run: browser },
 };
 const cached = ['--cache', '--cache-location', 'build/eslint'];
 
