@@ -66,7 +66,7 @@ export function CoveringFields({ names, library, finishes, services, isOutermost
         <Retarder services={services} />
       </Grid>
       <CoveringPreview names={names} />
-      <FormTextField control={control} name="note" label="Note" optional hint="Printed with the schedule" />
+      <FormTextField control={control} name="note" label="Note" optional hint="For the firm: it is not printed" />
     </>
   );
 }

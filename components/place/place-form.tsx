@@ -67,7 +67,7 @@ export function PlaceForm({ jobId, place, copyOf, ductLocations, onSaved, onCanc
             options={ductLocations.map(({ id, words }) => ({ value: id, label: words }))}
             hint={outdoor ? 'Sun and clear night sky are not counted.' : undefined}
           />
-          <FormTextField control={control} name="note" label="Note" optional />
+          <FormTextField control={control} name="note" label="Note" optional hint="Printed with the place" />
         </Grid>
       </Stack>
     </RowForm>

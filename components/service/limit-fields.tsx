@@ -109,7 +109,7 @@ function ValueFields({ form: { control }, index }: LimitAt) {
           control={control}
           name="codeExempt"
           label="Outside the table because"
-          hint="Left empty, the table applies. A reason is printed with the schedule."
+          hint="Left empty, the table applies. A reason is printed with the service."
           optional
         />
       </View>

@@ -71,7 +71,7 @@ export function ServiceForm(props: ServiceFormProps) {
         <FormQuantityField control={control} name="hours" label="Hours a year" kind="hours" hint="8760 is all year" />
         <FormNumberField control={control} name="position" label="Place in the schedule" whole />
       </Grid>
-      <FormTextField control={control} name="note" label="Note" optional />
+      <FormTextField control={control} name="note" label="Note" optional hint="Printed with the service" />
     </RowForm>
   );
 }
