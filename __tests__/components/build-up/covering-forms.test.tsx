@@ -13,6 +13,9 @@ import { Client } from '../../support/client';
 import { fakeApi } from '../../support/fake-api';
 import { serviceInput } from '../../support/job-inputs';
 
+// the drawings are a chunk of their own, which a test's document cannot fetch
+jest.mock('@/components/drawing/drawn', () => jest.requireActual('../../support/drawn'));
+
 // a machine that builds beside the tests is slow, not wrong
 jest.setTimeout(30_000);
 
@@ -185,6 +188,16 @@ describe('a specification row', () => {
     await showRow();
     expect(optionsOf('Thickness')).toEqual(['25 mm, 1 in', '51 mm, 2 in', '38 mm, 1-1/2 in']);
     expect(optionsOf('From size')).toEqual(['The smallest', 'DN 50, NPS 2', 'DN 100, NPS 4']);
+  });
+
+  it('draws what is entered as soon as every layer has its thickness', async () => {
+    await showRow(null);
+    const words = 'To scale, on the smallest of its pipes';
+    expect(screen.queryByText(words)).toBeNull();
+    pick('Material', 'std/mf_pipe');
+    await act(async () => pick('Thickness', 'in:2'));
+    expect(screen.getByText(words)).toBeTruthy();
+    expect(screen.getByText('51 mm mineral fibre pipe section')).toBeTruthy();
   });
 
   it('offers no bare surface as a finish', async () => {
